@@ -3,6 +3,7 @@ const config = {
   poweredByHeader: false,
   reactStrictMode: true,
   devIndicators: false,
+  experimental: { authInterrupts: true },
   serverExternalPackages: [
     '@electric-sql/pglite',
     '@node-rs/argon2',

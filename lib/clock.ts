@@ -1,0 +1,27 @@
+import { TZDate } from '@date-fns/tz';
+import { format } from 'date-fns';
+import type { ClockMinutes, PlainDate } from './domain/time/clock-minutes';
+import { readEnv } from './env';
+
+/** Where verbs get the present from, so that tests can say what it is. */
+export interface Clock {
+  now(): Date;
+}
+
+export const systemClock: Clock = {
+  now() {
+    const { fixedNow } = readEnv();
+    return fixedNow ? new Date(fixedNow) : new Date();
+  },
+};
+
+/** The calendar day at `moment` in a company's time zone. */
+export function dayIn(timeZone: string, moment: Date): PlainDate {
+  return format(new TZDate(moment, timeZone), 'yyyy-MM-dd');
+}
+
+/** Minutes after midnight at `moment` in a company's time zone. */
+export function clockMinutesIn(timeZone: string, moment: Date): ClockMinutes {
+  const local = new TZDate(moment, timeZone);
+  return local.getHours() * 60 + local.getMinutes();
+}
