@@ -7,7 +7,7 @@ import { POLICY, roleMay } from '../auth/policy';
 import type { Clock } from '../clock';
 import { systemClock } from '../clock';
 import type { Result } from '../domain/result';
-import { fail } from '../domain/result';
+import { fail, ok } from '../domain/result';
 import type { Ctx } from './context';
 import { makeContext } from './context';
 import type { Failure } from './failure';
@@ -19,7 +19,11 @@ export type HttpMethod = 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE';
  * One thing that people or scripts can do. The same object serves pages, routes, the API's
  * description and the generated tests.
  */
-export interface Verb<Input extends z.ZodType = z.ZodType, Output extends z.ZodType = z.ZodType> {
+export interface Verb<
+  Input extends z.ZodType = z.ZodType,
+  Output extends z.ZodType = z.ZodType,
+  Prepared extends z.output<Input> = z.output<Input>,
+> {
   /** "orders.send" */
   readonly name: string;
   /** A line for the API's description. */
@@ -30,13 +34,21 @@ export interface Verb<Input extends z.ZodType = z.ZodType, Output extends z.ZodT
   /** Refuses unknown keys: use z.strictObject. */
   readonly input: Input;
   readonly output: Output;
-  run(ctx: Ctx, input: z.output<Input>): Promise<Result<z.output<Output>, Failure>>;
+  /**
+   * Work that is not the database's and has to be over before the transaction begins: looking
+   * into a file, storing its bytes. What it adds to the input reaches `run`. It runs after the
+   * permission check and must be harmless when the verb then fails.
+   */
+  prepare?(input: z.output<Input>): Promise<Result<Prepared, Failure>>;
+  run(ctx: Ctx, input: Prepared): Promise<Result<z.output<Output>, Failure>>;
 }
 
 /** Declares a verb; the type parameters follow from its schemas. */
-export function defineVerb<Input extends z.ZodType, Output extends z.ZodType>(
-  verb: Verb<Input, Output>,
-): Verb<Input, Output> {
+export function defineVerb<
+  Input extends z.ZodType,
+  Output extends z.ZodType,
+  Prepared extends z.output<Input> = z.output<Input>,
+>(verb: Verb<Input, Output, Prepared>): Verb<Input, Output, Prepared> {
   return verb;
 }
 
@@ -67,12 +79,15 @@ export async function callVerb<Input extends z.ZodType, Output extends z.ZodType
   }
   const parsed = verb.input.safeParse(rawInput);
   if (!parsed.success) return fail(invalidInput(parsed.error));
+  const prepared = verb.prepare ? await verb.prepare(parsed.data) : ok(parsed.data);
+  if (!prepared.ok) return prepared;
   const { handle } = await openStore();
-  if (verb.kind === 'read') return verb.run(await makeContext(handle, actor, clock), parsed.data);
+  if (verb.kind === 'read')
+    return verb.run(await makeContext(handle, actor, clock), prepared.value);
   try {
     return await inTx({ companyId: actor.companyId, handle }, async (scope) => {
       const ctx = await makeContext(scope.handle, actor, clock);
-      const result = await verb.run(ctx, parsed.data);
+      const result = await verb.run(ctx, prepared.value);
       if (!result.ok) throw new RolledBack(result.error);
       if (!ctx.accounted()) throw new Error(`${verb.name} changed data without recording it`);
       return result;
