@@ -1,4 +1,5 @@
-import { foreignKey, index, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
+import { sql } from 'drizzle-orm';
+import { foreignKey, index, pgTable, text, unique, uniqueIndex, uuid } from 'drizzle-orm/pg-core';
 import { companyRecord, moment } from './columns';
 import { companies } from './companies';
 
@@ -8,7 +9,7 @@ export const people = pgTable(
   'people',
   {
     ...companyRecord(),
-    email: text('email').notNull().unique(),
+    email: text('email').notNull(),
     name: text('name').notNull(),
     role: text('role', { enum: ROLES }).notNull(),
     locale: text('locale', { enum: ['en', 'es'] })
@@ -19,6 +20,8 @@ export const people = pgTable(
   },
   (t) => [
     unique('people_company_id').on(t.companyId, t.id),
+    // One account for an address; a person who was removed may be invited again.
+    uniqueIndex('people_email').on(t.email).where(sql`removed_at is null`),
     foreignKey({ columns: [t.companyId], foreignColumns: [companies.id] }),
   ],
 );

@@ -12,7 +12,12 @@ export const decimalText = z
 export const positiveDecimalText = decimalText.refine((text) => Number(text) > 0, 'more than zero');
 export const name = z.string().trim().min(1, 'needed').max(120);
 export const note = z.string().trim().max(2000);
-export const email = z.email().trim().toLowerCase().max(254);
+/** Trimmed before it is judged: phones add a space after a completed word. */
+export const email = z
+  .string()
+  .trim()
+  .toLowerCase()
+  .pipe(z.email('an e-mail address such as name@company.com').max(254));
 
 /** One page of a list: `rows` from `offset`, and how many there are in all. */
 export const pageInput = {
