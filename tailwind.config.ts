@@ -13,6 +13,8 @@ export default {
       colors: {
         paper: token('paper'),
         sheet: token('sheet'),
+        desk: token('desk'),
+        band: token('band'),
         tab: token('tab'),
         canary: {
           DEFAULT: token('canary'),

@@ -1,0 +1,51 @@
+/** Words of the frame around every screen. */
+export const common = {
+  product: 'Strikeoff',
+  close: 'Close',
+  cancel: 'Cancel',
+  save: 'Save',
+  saved: 'Saved.',
+  working: 'Working…',
+  loading: 'Loading…',
+  menu: 'Menu',
+  mainMenu: 'Main',
+  skipToWork: 'Skip to the work',
+  account: 'Account',
+  signOut: 'Sign out',
+  home: 'Home',
+  goHome: 'Go to the start page',
+  tryAgain: 'Try again',
+  previous: 'Previous',
+  next: 'Next',
+  roles: { owner: 'owner', bookkeeper: 'bookkeeper', foreman: 'foreman' },
+  tabs: {
+    pourDay: 'Pour day',
+    jobs: 'Jobs',
+    orders: 'Orders',
+    tickets: 'Tickets',
+    suppliers: 'Suppliers',
+    statements: 'Statements',
+    variances: 'Variances',
+    yield: 'Yield',
+    company: 'Company',
+  },
+  copies: { ordered: 'Ordered', delivered: 'Delivered', billed: 'Billed' },
+  againstUs: 'against us',
+  inOurFavour: 'in our favour',
+  showingRows: (from: number, to: number, total: number) => `${from}–${to} of ${total}`,
+  notFound: {
+    title: 'No such page',
+    says: 'This address leads nowhere: the record may have been removed, or the link may be incomplete.',
+  },
+  forbidden: {
+    title: 'Not yours to open',
+    says: 'Your role does not include this page. The owner of your company can change that.',
+  },
+  broken: {
+    title: 'Something broke on our side',
+    says: 'Nothing that you had saved is lost. Try again; if it happens again, tell whoever runs this installation and quote the reference.',
+    reference: 'Reference',
+  },
+};
+
+export type CommonMessages = typeof common;

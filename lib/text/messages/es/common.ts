@@ -1,0 +1,51 @@
+import type { CommonMessages } from '../en/common';
+
+/** Las palabras del marco de cada pantalla. */
+export const common: CommonMessages = {
+  product: 'Strikeoff',
+  close: 'Cerrar',
+  cancel: 'Cancelar',
+  save: 'Guardar',
+  saved: 'Guardado.',
+  working: 'Un momento…',
+  loading: 'Cargando…',
+  menu: 'Menú',
+  mainMenu: 'Principal',
+  skipToWork: 'Ir al contenido',
+  account: 'Mi cuenta',
+  signOut: 'Salir',
+  home: 'Inicio',
+  goHome: 'Ir a la página de inicio',
+  tryAgain: 'Intentar de nuevo',
+  previous: 'Anterior',
+  next: 'Siguiente',
+  roles: { owner: 'dueño', bookkeeper: 'contabilidad', foreman: 'capataz' },
+  tabs: {
+    pourDay: 'Día de colado',
+    jobs: 'Obras',
+    orders: 'Pedidos',
+    tickets: 'Boletas',
+    suppliers: 'Proveedores',
+    statements: 'Estados de cuenta',
+    variances: 'Diferencias',
+    yield: 'Rendimiento',
+    company: 'Empresa',
+  },
+  copies: { ordered: 'Pedido', delivered: 'Entregado', billed: 'Cobrado' },
+  againstUs: 'en contra nuestra',
+  inOurFavour: 'a nuestro favor',
+  showingRows: (from, to, total) => `${from}–${to} de ${total}`,
+  notFound: {
+    title: 'No existe esta página',
+    says: 'Esta dirección no lleva a nada: quizá el registro se eliminó o el enlace está incompleto.',
+  },
+  forbidden: {
+    title: 'No tiene acceso a esta página',
+    says: 'Su puesto no incluye esta página. El dueño de su empresa puede cambiarlo.',
+  },
+  broken: {
+    title: 'Algo falló de nuestro lado',
+    says: 'Nada de lo que guardó se perdió. Intente de nuevo; si vuelve a pasar, avise a quien administra esta instalación y dé la referencia.',
+    reference: 'Referencia',
+  },
+};
