@@ -14,4 +14,6 @@ export interface Actor {
   /** Without it, only jobs of the person's own crew exist. */
   readonly seesAllJobs: boolean;
   readonly via: 'session' | 'accessKey';
+  /** The stored id of the session the request came with; null for an access key. */
+  readonly sessionId: string | null;
 }

@@ -7,6 +7,7 @@ export function isOwnOrigin(headers: Headers, appOrigin: string, host: string | 
   const site = headers.get('sec-fetch-site');
   if (site) return site === 'same-origin';
   const origin = headers.get('origin');
-  if (!origin) return false;
-  return origin === appOrigin || (host !== null && new URL(origin).host === host);
+  // A sandboxed page sends the word "null", which is no address.
+  if (!origin || !URL.canParse(origin)) return false;
+  return origin === new URL(appOrigin).origin || (host !== null && new URL(origin).host === host);
 }

@@ -35,7 +35,7 @@ async function admit(request: NextRequest): Promise<{ actor: Actor } | { refusal
   return { refusal: failureResponse(failure('notSignedIn', 'Please sign in first.')) };
 }
 
-function isChange(method: string): boolean {
+export function isChange(method: string): boolean {
   return method !== 'GET' && method !== 'HEAD';
 }
 
@@ -44,7 +44,10 @@ export function comesFromUs(request: NextRequest): boolean {
 }
 
 /** Query and path of a request as one flat object; a repeated query name becomes an array. */
-async function addressInput(request: NextRequest, context: RouteContext) {
+export async function addressInput(
+  request: NextRequest,
+  context: RouteContext,
+): Promise<Record<string, unknown>> {
   const input: Record<string, unknown> = {};
   for (const key of new Set(request.nextUrl.searchParams.keys())) {
     const values = request.nextUrl.searchParams.getAll(key);

@@ -1,23 +1,11 @@
 import { eq } from 'drizzle-orm';
 import type { Handle } from '../../db/client';
-import { activity } from '../../db/schema/activity';
 import { companies } from '../../db/schema/companies';
 import type { Scope } from '../../db/tx';
 import type { Actor } from '../auth/actor';
 import type { Clock } from '../clock';
-import { newId } from '../ids';
-
-/** A change as the activity record keeps it. */
-export interface Change {
-  /** "orders.send" */
-  readonly action: string;
-  readonly entity: string;
-  readonly entityId: string;
-  /** One line for a person: "Sent order CR-1187 to Cinder Ridge Ready-Mix". */
-  readonly summary: string;
-  readonly before?: unknown;
-  readonly after?: unknown;
-}
+import type { Change } from './record';
+import { writeActivity } from './record';
 
 export interface CompanySettings {
   readonly name: string;
@@ -64,19 +52,9 @@ export async function makeContext(handle: Handle, actor: Actor, clock: Clock): P
     },
     async record(change) {
       accounted = true;
-      await handle.insert(activity).values({
-        id: newId(),
-        companyId: actor.companyId,
-        at: clock.now(),
-        actorId: actor.personId,
-        actorName: actor.via === 'accessKey' ? `${actor.name} (access key)` : actor.name,
-        action: change.action,
-        entity: change.entity,
-        entityId: change.entityId,
-        summary: change.summary,
-        before: change.before ?? null,
-        after: change.after ?? null,
-      });
+      const name = actor.via === 'accessKey' ? `${actor.name} (access key)` : actor.name;
+      const who = { companyId: actor.companyId, id: actor.personId, name };
+      await writeActivity(handle, who, clock.now(), change);
     },
   };
 }

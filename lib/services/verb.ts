@@ -39,7 +39,7 @@ export interface Verb<
    * into a file, storing its bytes. What it adds to the input reaches `run`. It runs after the
    * permission check and must be harmless when the verb then fails.
    */
-  prepare?(input: z.output<Input>): Promise<Result<Prepared, Failure>>;
+  prepare?(input: z.output<Input>, actor: Actor): Promise<Result<Prepared, Failure>>;
   run(ctx: Ctx, input: Prepared): Promise<Result<z.output<Output>, Failure>>;
 }
 
@@ -79,7 +79,7 @@ export async function callVerb<Input extends z.ZodType, Output extends z.ZodType
   }
   const parsed = verb.input.safeParse(rawInput);
   if (!parsed.success) return fail(invalidInput(parsed.error));
-  const prepared = verb.prepare ? await verb.prepare(parsed.data) : ok(parsed.data);
+  const prepared = verb.prepare ? await verb.prepare(parsed.data, actor) : ok(parsed.data);
   if (!prepared.ok) return prepared;
   const { handle } = await openStore();
   if (verb.kind === 'read')
