@@ -39,6 +39,8 @@ async function onServer(url: string): Promise<Store> {
   const address = new URL(url);
   address.pathname = `/${database}`;
   const pool = new pg.Pool({ connectionString: address.href, max: 5 });
+  // Dropping the database ends connections that are still saying goodbye.
+  pool.on('error', () => undefined);
   return {
     kind: 'postgres',
     handle: drizzlePg({ client: pool }) as unknown as Handle,
