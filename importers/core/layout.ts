@@ -84,6 +84,8 @@ export const importLayoutSchema = z.strictObject({
    * The titles themselves, normalised. Where present, the title row is looked for by its
    * content, so that a longer preamble next month does not matter; where no row has these
    * titles, the remembered columns are not trusted and the guess is made afresh.
+   * A form in which a person changes encoding, delimiter or title row sends null here, and
+   * columns that are all null where it wants them guessed again.
    */
   headerSignature: z.string().max(4000).nullable().default(null),
   dateOrder: z.enum(DATE_ORDERS),
