@@ -6,6 +6,8 @@ import type { DefaultValues, FieldValues, Path, UseFormReturn } from 'react-hook
 import { useForm } from 'react-hook-form';
 import type { z } from 'zod';
 import { ApiFailure } from '@/lib/queries/api';
+import { failureText, issueText } from '@/lib/text/problems';
+import { useLocale } from '../ui/locale';
 
 type FormSchema = z.ZodType<FieldValues, FieldValues>;
 
@@ -52,6 +54,7 @@ function errorAt(errors: unknown, path: string): string | undefined {
 export function useApiForm<Schema extends FormSchema, Answer>(
   options: ApiFormOptions<Schema, Answer>,
 ): ApiForm<z.input<Schema>, z.output<Schema>> {
+  const locale = useLocale();
   const [problem, setProblem] = useState<string | null>(null);
   const [doneCount, setDoneCount] = useState(0);
   const form = useForm<z.input<Schema>, unknown, z.output<Schema>>({
@@ -75,7 +78,7 @@ export function useApiForm<Schema extends FormSchema, Answer>(
           foreign.push(issue.path ? `${issue.path}: ${issue.message}` : issue.message);
         }
       }
-      setProblem([error.message, ...foreign].join(' '));
+      setProblem([failureText(locale, error), ...foreign].join(' '));
       return;
     }
     setDoneCount((count) => count + 1);
@@ -85,7 +88,10 @@ export function useApiForm<Schema extends FormSchema, Answer>(
   return {
     form,
     register: form.register,
-    errorOf: (path) => errorAt(form.formState.errors, path),
+    errorOf: (path) => {
+      const message = errorAt(form.formState.errors, path);
+      return message === undefined ? undefined : issueText(locale, message);
+    },
     problem,
     doneCount,
     pending: form.formState.isSubmitting,
