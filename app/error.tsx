@@ -1,33 +1,13 @@
 'use client';
 
-import { BlankForm } from '@/components/shell/blank-form';
-import { Button, LinkButton } from '@/components/ui/button';
-import { useCommon } from '@/components/ui/locale';
-import { routes } from '@/lib/routes';
+import { BarePage } from '@/components/shell/bare-page';
+import type { BrokenProps } from '@/components/shell/blank-pages';
+import { BrokenForm } from '@/components/shell/blank-pages';
 
-interface ErrorProps {
-  error: Error & { digest?: string };
-  reset: () => void;
-}
-
-export default function ErrorPage({ error, reset }: ErrorProps) {
-  const words = useCommon();
+export default function Broken(props: BrokenProps) {
   return (
-    <BlankForm
-      title={words.broken.title}
-      actions={
-        <>
-          <Button onClick={reset}>{words.tryAgain}</Button>
-          <LinkButton href={routes.home()}>{words.goHome}</LinkButton>
-        </>
-      }
-    >
-      <p>{words.broken.says}</p>
-      {error.digest && (
-        <p className="mt-3">
-          {words.broken.reference} <span className="font-code text-ink">{error.digest}</span>
-        </p>
-      )}
-    </BlankForm>
+    <BarePage>
+      <BrokenForm {...props} />
+    </BarePage>
   );
 }

@@ -1,21 +1,17 @@
 'use client';
 
+import type { BrokenProps } from '@/components/shell/blank-pages';
+import Broken from './error';
 import { fontVariables } from './fonts';
 import './globals.css';
-import ErrorPage from './error';
-
-interface GlobalErrorProps {
-  error: Error & { digest?: string };
-  reset: () => void;
-}
 
 /** Stands in for the whole page when even the frame broke. */
-export default function GlobalError(props: GlobalErrorProps) {
+export default function GlobalError(props: BrokenProps) {
   return (
     <html lang="en" className={fontVariables}>
       <body>
         <title>Strikeoff</title>
-        <ErrorPage {...props} />
+        <Broken {...props} />
       </body>
     </html>
   );

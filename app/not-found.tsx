@@ -1,18 +1,10 @@
-'use client';
-
-import { BlankForm } from '@/components/shell/blank-form';
-import { LinkButton } from '@/components/ui/button';
-import { useCommon } from '@/components/ui/locale';
-import { routes } from '@/lib/routes';
+import { BarePage } from '@/components/shell/bare-page';
+import { NotFoundForm } from '@/components/shell/blank-pages';
 
 export default function NotFound() {
-  const words = useCommon();
   return (
-    <BlankForm
-      title={words.notFound.title}
-      actions={<LinkButton href={routes.home()}>{words.goHome}</LinkButton>}
-    >
-      {words.notFound.says}
-    </BlankForm>
+    <BarePage>
+      <NotFoundForm />
+    </BarePage>
   );
 }

@@ -1,4 +1,13 @@
 'use client';
 
-/* Here as well as at the root, so that a broken page keeps the tabs above it. */
-export { default } from '../error';
+import type { BrokenProps } from '@/components/shell/blank-pages';
+import { BrokenForm } from '@/components/shell/blank-pages';
+
+/** Here as well as at the root, so that a broken page keeps the tabs above it. */
+export default function OfficeBroken(props: BrokenProps) {
+  return (
+    <div className="px-4">
+      <BrokenForm {...props} />
+    </div>
+  );
+}

@@ -1,2 +1,10 @@
-/* Here as well as at the root, so that the tabs stay above it. */
-export { default } from '../forbidden';
+import { ForbiddenForm } from '@/components/shell/blank-pages';
+
+/** Here as well as at the root, so that the tabs stay above it. */
+export default function OfficeForbidden() {
+  return (
+    <div className="px-4">
+      <ForbiddenForm />
+    </div>
+  );
+}

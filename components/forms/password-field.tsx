@@ -24,7 +24,7 @@ export function PasswordField({ showLabel, hideLabel, ...field }: PasswordFieldP
         type="button"
         aria-pressed={shown}
         onClick={() => setShown(!shown)}
-        className="absolute -top-3 right-0 min-h-9 px-1 text-[13px] font-semibold text-carbon underline underline-offset-2"
+        className="absolute -top-2 right-0 min-h-8 px-1 text-[13px] font-semibold text-carbon underline underline-offset-2"
       >
         {shown ? hideLabel : showLabel}
       </button>

@@ -9,8 +9,8 @@ interface BlankFormProps {
 /** A page that has only a few words to say: missing, refused or broken. */
 export function BlankForm({ title, children, actions }: BlankFormProps) {
   return (
-    <div className="mx-auto w-full max-w-xl px-4 py-10 md:py-16">
-      <section className="border border-wet bg-sheet">
+    <div className="mx-auto w-full max-w-xl py-6">
+      <section className="border border-b-0 border-wet bg-sheet">
         <div className="double-rule mx-6 pt-7 pb-3">
           <h1 className="text-2xl">{title}</h1>
         </div>

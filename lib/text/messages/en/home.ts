@@ -1,7 +1,7 @@
 /** Words of the page that people see before they sign in. */
 export const home = {
   kind: 'For concrete flatwork contractors',
-  title: 'Ordered, delivered, billed: strike off what agrees.',
+  title: 'Ordered, delivered, billed: strike\u00a0off what agrees.',
   says: 'The order was a phone call. The delivery is a paper ticket handed to a foreman with wet gloves. The bill is a statement of a few hundred lines at the end of the month. Strikeoff lays the three side by side, works out what each supplier should charge, and shows what does not agree, to the cent, before the discount date.',
   signIn: 'Sign in',
   signUp: 'Set up a company',

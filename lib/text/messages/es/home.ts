@@ -3,7 +3,7 @@ import type { HomeMessages } from '../en/home';
 /** Las palabras de la página que se ve antes de entrar. */
 export const home: HomeMessages = {
   kind: 'Para contratistas de losas y pisos de concreto',
-  title: 'Pedido, entregado, cobrado: tache lo que coincide.',
+  title: 'Pedido, entregado, cobrado: tache\u00a0lo\u00a0que coincide.',
   says: 'El pedido fue una llamada. La entrega es una boleta de papel en manos de un capataz con guantes mojados. El cobro es un estado de cuenta de cientos de renglones a fin de mes. Strikeoff pone los tres lado a lado, calcula lo que cada proveedor debe cobrar y muestra lo que no coincide, al centavo y antes de la fecha del descuento.',
   signIn: 'Entrar',
   signUp: 'Dar de alta una empresa',
