@@ -25,3 +25,9 @@ export function clockMinutesIn(timeZone: string, moment: Date): ClockMinutes {
   const local = new TZDate(moment, timeZone);
   return local.getHours() * 60 + local.getMinutes();
 }
+
+/** The moment at which `day` begins in a company's time zone, `days` later if asked. */
+export function startOfDay(timeZone: string, day: PlainDate, days = 0): Date {
+  const [year = 0, month = 1, date = 1] = day.split('-').map(Number);
+  return new Date(new TZDate(year, month - 1, date + days, timeZone).getTime());
+}

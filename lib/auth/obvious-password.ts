@@ -40,7 +40,8 @@ export function isObviousPassword(password: string, about: readonly string[]): b
   if (new Set(lower).size < 4) return true;
   if (isRun(lower)) return true;
   const letters = lettersOf(lower);
-  const readAsWords = lettersOf([...lower].map((c) => LOOK_ALIKES[c] ?? c).join(''));
+  const core = lower.replace(/^\P{L}+|\P{L}+$/gu, '');
+  const readAsWords = lettersOf([...core].map((c) => LOOK_ALIKES[c] ?? c).join(''));
   if (isObviousWord(letters) || isObviousWord(readAsWords)) return true;
   return about.some((text) => {
     const own = [text.toLowerCase(), text.toLowerCase().split('@')[0] ?? ''];

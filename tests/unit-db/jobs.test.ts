@@ -24,5 +24,8 @@ test('a job number is used once, and the refusal names the field', async () => {
   const { owner } = await testCompany(store);
   await callVerb(createJob, owner, { number: '1', name: 'First' });
   const again = await callVerb(createJob, owner, { number: '1', name: 'Second' });
-  expect(!again.ok && again.error).toMatchObject({ code: 'conflict', issues: [{ path: 'number' }] });
+  expect(!again.ok && again.error).toMatchObject({
+    code: 'conflict',
+    issues: [{ path: 'number' }],
+  });
 });
