@@ -1,217 +1,217 @@
-import Decimal from 'decimal.js';
 import type { OrderFacts, PumpTicketFacts, TicketFacts } from '../facts';
-import { count, money, roundCents, sumMoney } from '../money/money';
-import type { Charge, ClauseOf } from './clause-module';
-import type { Clause, ClauseKind, IdentifiedClause, RateSheetFacts } from './clauses';
+import { extend, roundCents, sumMoney } from '../money/money';
+import { day } from '../words';
+import type { Clause, RateSheetFacts } from './clauses';
+import {
+  CHARGE_KIND_OF,
+  isLoadClause,
+  isPumpClause,
+  rateLoad,
+  ratePump,
+} from './clauses-by-kind/registry';
+import type { Rated } from './clauses-by-kind/rule';
+import { taxRule } from './clauses-by-kind/tax';
 import type { ExpectedBill, ExpectedLine, UnratedDelivery } from './expected-line';
-import { moduleOf } from './registry';
-import { sheetFor } from './select-sheet';
-import { dollars } from './words';
+import { indexOrders, type OrderIndex } from './order-index';
+import { indexSheets, type PreparedSheet, type SheetIndex, type TaxClause } from './sheet-index';
 
 export interface RatingInput {
   readonly rateSheets: readonly RateSheetFacts[];
   readonly orders: readonly OrderFacts[];
   readonly tickets: readonly TicketFacts[];
   readonly pumpTickets: readonly PumpTicketFacts[];
+  /**
+   * The invoice that bills a delivery, by ticket or pump ticket id, where it is known: tax is
+   * then expected once per invoice, else once for all deliveries together.
+   */
+  readonly invoiceOf?: ReadonlyMap<string, string>;
 }
 
-/**
- * What the suppliers should charge for these deliveries: for each, the clauses of the sheet in
- * force on its day (a job's own before the supplier's), line by line with the arithmetic; then
- * tax per order, or per day where a delivery has none. A missing fact makes a line
- * `notProvable` with its range; a delivery that no sheet covers is listed as unrated.
- * The result does not depend on the order of the input. Source of the rules: domain.md §3.
- */
-export function expectedBill(input: RatingInput): ExpectedBill {
-  const lines: ExpectedLine[] = [];
-  const unrated: UnratedDelivery[] = [];
-  const balanceLoads = findBalanceLoads(input.tickets);
-  for (const load of sortedById(input.tickets)) {
-    const sheet = sheetFor(input.rateSheets, load);
-    if (!sheet) {
-      unrated.push(unratedLoad(load, 'no rate sheet is in force for its supplier on that day'));
-      continue;
-    }
-    const before = lines.length;
-    for (const one of clausesFor(sheet, load)) {
-      const context = { isBalanceLoad: balanceLoads.has(load.id) };
-      const charge = moduleOf(one.clause as ClauseOf<ClauseKind>).rateLoad?.(
-        one.clause as never,
-        load,
-        context,
-      );
-      if (charge) lines.push(lineOf(charge, one, sheet, load, { ticketIds: [load.id] }));
-    }
-    if (!lines.slice(before).some((line) => line.chargeKind === 'mix')) {
-      unrated.push(
-        unratedLoad(load, `the sheet ${sheet.name} has no price for mix ${load.mixCode}`),
-      );
-    }
-  }
-  for (const pump of sortedById(input.pumpTickets)) {
-    const sheet = sheetFor(input.rateSheets, pump);
-    if (!sheet) {
-      unrated.push({
-        ticketId: null,
-        pumpTicketId: pump.id,
-        reason: `Pump ticket ${pump.number}: no rate sheet is in force for its supplier on that day.`,
-      });
-      continue;
-    }
-    for (const one of sheet.clauses) {
-      const charge = moduleOf(one.clause as ClauseOf<ClauseKind>).ratePumpTicket?.(
-        one.clause as never,
-        pump,
-      );
-      if (charge) lines.push(lineOf(charge, one, sheet, pump, { pumpTicketIds: [pump.id] }));
-    }
-  }
-  return { lines: [...lines, ...taxLines(input, lines)], unrated };
+type Delivery = TicketFacts | PumpTicketFacts;
+
+interface Collected {
+  readonly owed: ExpectedLine[];
+  readonly notOwed: ExpectedLine[];
+  readonly unrated: UnratedDelivery[];
+  /** Taxable amounts by tax clause and invoice. */
+  readonly tax: Map<string, TaxGroup>;
 }
 
-function sortedById<T extends { readonly id: string }>(rows: readonly T[]): T[] {
-  return [...rows].sort((a, b) => (a.id < b.id ? -1 : 1));
+interface TaxGroup {
+  readonly tax: TaxClause;
+  readonly sheet: PreparedSheet;
+  readonly invoice: string | null;
+  readonly lines: ExpectedLine[];
 }
 
-function unratedLoad(load: TicketFacts, why: string): UnratedDelivery {
-  return { ticketId: load.id, pumpTicketId: null, reason: `Load ${load.number}: ${why}.` };
-}
-
-/** The last load of every order of several loads. */
-function findBalanceLoads(tickets: readonly TicketFacts[]): ReadonlySet<string> {
-  const byOrder = new Map<string, TicketFacts[]>();
-  for (const load of tickets) {
-    if (load.orderId) byOrder.set(load.orderId, [...(byOrder.get(load.orderId) ?? []), load]);
-  }
-  const last = new Set<string>();
-  for (const loads of byOrder.values()) {
-    if (loads.length < 2) continue;
-    const inOrder = [...loads].sort(
-      (a, b) =>
-        a.date.localeCompare(b.date) ||
-        (a.loadNumber ?? 0) - (b.loadNumber ?? 0) ||
-        (a.batchedAt ?? 0) - (b.batchedAt ?? 0) ||
-        (a.id < b.id ? -1 : 1),
-    );
-    const final = inOrder.at(-1);
-    if (final) last.add(final.id);
-  }
-  return last;
-}
-
-/** A sheet's clauses for one load: of its mix prices only the one for the load's mix. */
-function clausesFor(sheet: RateSheetFacts, load: TicketFacts): IdentifiedClause[] {
-  const mixes = sheet.clauses.filter((one) => one.clause.kind === 'mixPrice');
-  const code = (one: IdentifiedClause) => (one.clause as ClauseOf<'mixPrice'>).mixCode;
-  const fitting =
-    mixes.find((one) => code(one)?.toUpperCase() === load.mixCode.toUpperCase()) ??
-    mixes.find((one) => code(one) === null);
-  return sheet.clauses.filter((one) => one.clause.kind !== 'mixPrice' || one === fitting);
-}
-
-function lineOf(
-  charge: Charge,
-  one: IdentifiedClause,
-  sheet: RateSheetFacts,
-  delivery: TicketFacts | PumpTicketFacts,
-  ids: { ticketIds?: string[]; pumpTicketIds?: string[] },
+/** A rated clause as a line; the amount is quantity × rate to the cent, here and nowhere else. */
+function toLine(
+  rated: Rated,
+  sheet: PreparedSheet,
+  clause: { readonly id: string; readonly clause: Clause },
+  delivery: Delivery,
+  kind: 'ticket' | 'pumpTicket',
 ): ExpectedLine {
-  return {
-    ...charge,
-    key: `${one.id}:${delivery.id}`,
-    chargeKind: moduleOf(one.clause as ClauseOf<ClauseKind>).chargeKind,
-    clauseId: one.id,
-    rateSheetId: sheet.id,
+  const base = {
+    key: `${clause.id}:${delivery.id}`,
+    chargeKind: CHARGE_KIND_OF[clause.clause.kind],
+    clauseId: clause.id,
+    rateSheetId: sheet.sheet.id,
     supplierId: delivery.supplierId,
+    label: rated.label,
     date: delivery.date,
-    ticketIds: ids.ticketIds ?? [],
-    pumpTicketIds: ids.pumpTicketIds ?? [],
+    ticketIds: kind === 'ticket' ? [delivery.id] : [],
+    pumpTicketIds: kind === 'pumpTicket' ? [delivery.id] : [],
     orderId: delivery.orderId,
     jobId: delivery.jobId,
+    explanation: rated.explanation,
+  };
+  if (rated.status === 'notProvable') {
+    const { missing, lowest, highest } = rated;
+    return {
+      ...base,
+      status: 'notProvable',
+      missing,
+      lowest: roundCents(lowest),
+      highest: highest && roundCents(highest),
+    };
+  }
+  const { quantity, unit, rate } = rated;
+  const amount = roundCents(extend(quantity, rate));
+  return { ...base, status: 'owed', quantity, unit, rate, amount };
+}
+
+function noSheet(delivery: Delivery): string {
+  return `No rate sheet is in effect on ${day(delivery.date)} for the supplier of ${delivery.number}.`;
+}
+
+function collect(
+  into: Collected,
+  line: ExpectedLine,
+  clause: Clause,
+  sheet: PreparedSheet,
+  exempt: boolean,
+  invoice: string | null,
+): void {
+  const nothing = line.status === 'owed' && line.amount.isZero();
+  (nothing ? into.notOwed : into.owed).push(line);
+  const { tax } = sheet;
+  if (!tax || exempt || line.status !== 'owed' || clause.kind === 'tax') return;
+  if (!tax.clause.taxes.includes(clause.kind)) return;
+  const key = JSON.stringify([tax.id, invoice]);
+  const group = into.tax.get(key) ?? { tax, sheet, invoice, lines: [] };
+  group.lines.push(line);
+  into.tax.set(key, group);
+}
+
+interface Context {
+  readonly sheets: SheetIndex;
+  readonly orders: OrderIndex;
+  readonly invoiceOf: ReadonlyMap<string, string>;
+}
+
+function rateTicket(ticket: TicketFacts, context: Context, into: Collected): void {
+  const sheet = context.sheets.sheetFor(ticket.supplierId, ticket.jobId, ticket.date);
+  if (!sheet) {
+    into.unrated.push({ ticketId: ticket.id, pumpTicketId: null, reason: noSheet(ticket) });
+    return;
+  }
+  const mixPrice = sheet.priceOf(ticket.mixCode);
+  if (!mixPrice) {
+    const reason = `${sheet.sheet.name} has no price for mix ${ticket.mixCode} of load ${ticket.number}.`;
+    into.unrated.push({ ticketId: ticket.id, pumpTicketId: null, reason });
+  }
+  const load = { ticket, isBalanceLoad: context.orders.isBalanceLoad(ticket) };
+  const exempt = context.orders.isExempt(ticket);
+  const invoice = context.invoiceOf.get(ticket.id) ?? null;
+  for (const clause of mixPrice ? [mixPrice, ...sheet.others] : sheet.others) {
+    if (!isLoadClause(clause.clause)) continue;
+    const line = toLine(rateLoad(clause.clause, load), sheet, clause, ticket, 'ticket');
+    collect(into, line, clause.clause, sheet, exempt, invoice);
+  }
+}
+
+function ratePumpTicket(ticket: PumpTicketFacts, context: Context, into: Collected): void {
+  const sheet = context.sheets.sheetFor(ticket.supplierId, ticket.jobId, ticket.date);
+  if (!sheet) {
+    into.unrated.push({ ticketId: null, pumpTicketId: ticket.id, reason: noSheet(ticket) });
+    return;
+  }
+  const clauses = sheet.others.filter(({ clause }) => isPumpClause(clause));
+  if (clauses.length === 0) {
+    const reason = `${sheet.sheet.name} has no price for a pump (pump ticket ${ticket.number}).`;
+    into.unrated.push({ ticketId: null, pumpTicketId: ticket.id, reason });
+  }
+  const exempt = context.orders.isExempt(ticket);
+  const invoice = context.invoiceOf.get(ticket.id) ?? null;
+  for (const clause of clauses) {
+    if (!isPumpClause(clause.clause)) continue;
+    const line = toLine(ratePump(clause.clause, ticket), sheet, clause, ticket, 'pumpTicket');
+    collect(into, line, clause.clause, sheet, exempt, invoice);
+  }
+}
+
+function taxLine({ tax, sheet, invoice, lines }: TaxGroup): ExpectedLine {
+  const taxable = sumMoney(
+    lines.map((line) => (line.status === 'owed' ? line.amount : line.lowest)),
+  );
+  const name = invoice === null ? 'these deliveries' : `invoice ${invoice}`;
+  const rated = taxRule.rate(tax.clause, { taxable, name });
+  if (rated.status !== 'owed') throw new Error('tax is always provable from its base');
+  return {
+    key: `${tax.id}:${invoice ?? 'all'}`,
+    chargeKind: 'tax',
+    clauseId: tax.id,
+    rateSheetId: sheet.sheet.id,
+    supplierId: sheet.sheet.supplierId,
+    label: rated.label,
+    date:
+      lines
+        .map((line) => line.date)
+        .sort()
+        .at(-1) ?? '',
+    ticketIds: [...new Set(lines.flatMap((line) => line.ticketIds))],
+    pumpTicketIds: [...new Set(lines.flatMap((line) => line.pumpTicketIds))],
+    orderId: null,
+    jobId: null,
+    explanation: rated.explanation,
+    status: 'owed',
+    quantity: rated.quantity,
+    unit: rated.unit,
+    rate: rated.rate,
+    amount: roundCents(extend(rated.quantity, rated.rate)),
   };
 }
 
-/** The tax clause of a sheet, where it has one. */
-export function taxClauseOf(
-  sheet: RateSheetFacts,
-): { id: string; clause: Extract<Clause, { kind: 'tax' }> } | null {
-  for (const one of sheet.clauses) {
-    if (one.clause.kind === 'tax') return { id: one.id, clause: one.clause };
-  }
-  return null;
-}
-
-const TAXED_AS = {
-  mix: 'mixPrice',
-  shortLoad: 'shortLoad',
-  waiting: 'waiting',
-  perLoadFee: 'perLoadFee',
-  perYardFee: 'perYardFee',
-  pumpTime: 'pumpTime',
-  pumpMinimum: 'pumpTime',
-  pumpYards: 'pumpYards',
-  pumpSetUp: 'pumpSetUp',
-  tax: null,
-  other: null,
-} as const;
-
-/** Whether `clause` taxes lines of this kind. */
-export function isTaxed(
-  clause: Extract<Clause, { kind: 'tax' }>,
-  chargeKind: keyof typeof TAXED_AS,
-): boolean {
-  const kind = TAXED_AS[chargeKind];
-  return kind !== null && clause.taxes.includes(kind);
-}
-
-/** One tax line an order (or supplier and day), rounded once on its sum. */
-function taxLines(input: RatingInput, lines: readonly ExpectedLine[]): ExpectedLine[] {
-  const sheets = new Map(input.rateSheets.map((sheet) => [sheet.id, sheet]));
-  const exempt = new Set(input.orders.filter((order) => !order.taxable).map((order) => order.id));
-  const groups = new Map<string, ExpectedLine[]>();
-  for (const line of lines) {
-    if (line.orderId && exempt.has(line.orderId)) continue;
-    const key = `${line.rateSheetId}:${line.orderId ?? `${line.supplierId}:${line.date}`}`;
-    groups.set(key, [...(groups.get(key) ?? []), line]);
-  }
-  return [...groups].flatMap(([key, group]): ExpectedLine[] => {
-    const [first] = group;
-    const sheet = first ? sheets.get(first.rateSheetId) : undefined;
-    const tax = sheet ? taxClauseOf(sheet) : null;
-    if (!first || !tax) return [];
-    const taxed = group.flatMap((line) =>
-      line.status === 'owed' && isTaxed(tax.clause, line.chargeKind) ? [line.amount] : [],
-    );
-    if (taxed.length === 0) return [];
-    const base = sumMoney(taxed);
-    const amount = roundCents(base.times(tax.clause.ratePercent).div(100));
-    const sum = `${dollars(base)} × ${new Decimal(tax.clause.ratePercent).toString()} %`;
-    return [
-      {
-        status: 'owed',
-        key: `${tax.id}:${key}`,
-        chargeKind: 'tax',
-        clauseId: tax.id,
-        rateSheetId: first.rateSheetId,
-        supplierId: first.supplierId,
-        label: 'Sales tax',
-        date: first.date,
-        ticketIds: [...new Set(group.flatMap((line) => line.ticketIds))],
-        pumpTicketIds: [...new Set(group.flatMap((line) => line.pumpTicketIds))],
-        orderId: first.orderId,
-        jobId: first.jobId,
-        quantity: count(1),
-        unit: 'order',
-        rate: money(amount),
-        amount,
-        explanation: {
-          sentence: `Sales tax on ${dollars(base)} taxable: ${sum} = ${dollars(amount)}.`,
-          steps: [
-            { label: 'Taxable', value: dollars(base) },
-            { label: sum, value: dollars(amount) },
-          ],
-        },
-      },
-    ];
+/** Deliveries in a fixed order, whatever order they come in. */
+function inOrder<D extends Delivery>(deliveries: readonly D[]): D[] {
+  const key = ({ date, number, id }: D) => [date, number, id];
+  return [...deliveries].sort((one, other) => {
+    const [first, second] = [key(one), key(other)];
+    const at = first.findIndex((part, index) => part !== second[index]);
+    return at < 0 ? 0 : (first[at] ?? '') < (second[at] ?? '') ? -1 : 1;
   });
+}
+
+/**
+ * What the rate sheets say these deliveries should cost: a line per ticket and clause, then tax.
+ * Lines whose clause comes to nothing are in `notOwed` with the reason; a delivery that no sheet
+ * or price covers is in `unrated`; a line with a missing fact is `notProvable` with its range and
+ * is not in the tax base. The result does not depend on the order of the input.
+ */
+export function expectedBill(input: RatingInput): ExpectedBill {
+  const context: Context = {
+    sheets: indexSheets(input.rateSheets),
+    orders: indexOrders(input.orders, input.tickets),
+    invoiceOf: input.invoiceOf ?? new Map(),
+  };
+  const into: Collected = { owed: [], notOwed: [], unrated: [], tax: new Map() };
+  for (const ticket of inOrder(input.tickets)) rateTicket(ticket, context, into);
+  for (const ticket of inOrder(input.pumpTickets)) ratePumpTicket(ticket, context, into);
+  const taxes = [...into.tax.values()].map(taxLine);
+  return {
+    lines: [...into.owed, ...taxes],
+    notOwed: into.notOwed,
+    unrated: into.unrated,
+  };
 }

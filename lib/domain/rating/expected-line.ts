@@ -56,5 +56,7 @@ export interface UnratedDelivery {
 
 export interface ExpectedBill {
   readonly lines: readonly ExpectedLine[];
+  /** Clauses that come to nothing for a delivery (a load that is not short), with the reason. */
+  readonly notOwed: readonly ExpectedLine[];
   readonly unrated: readonly UnratedDelivery[];
 }
