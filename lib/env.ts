@@ -17,7 +17,16 @@ export interface Env {
   readonly fixedNow: string | null;
   /** Honour X-Forwarded-For only behind a proxy that sets it. */
   readonly trustProxy: boolean;
+  /** Hours between two backups of the embedded database; 0 for none. */
+  readonly backupHours: number;
+  /** How many of those backups are kept. */
+  readonly backupKeep: number;
   readonly logLevel: string;
+}
+
+/** A whole number from the environment, or `fallback` where it is missing or is none. */
+function wholeNumber(text: string | undefined, fallback: number): number {
+  return text !== undefined && /^\d{1,6}$/.test(text) ? Number(text) : fallback;
 }
 
 export function readEnv(source: NodeJS.ProcessEnv = process.env): Env {
@@ -32,6 +41,8 @@ export function readEnv(source: NodeJS.ProcessEnv = process.env): Env {
     demo: source.DEMO !== 'off',
     fixedNow: source.STRIKEOFF_NOW || null,
     trustProxy: source.TRUST_PROXY === 'on',
+    backupHours: wholeNumber(source.BACKUP_HOURS, 24),
+    backupKeep: Math.max(1, wholeNumber(source.BACKUP_KEEP, 7)),
     logLevel: source.LOG_LEVEL ?? 'info',
   };
 }

@@ -15,7 +15,7 @@ const LIMITS = {
   signInAccountAndAddress: { points: 8, seconds: 15 * MINUTE },
   signInAccount: { points: 40, seconds: HOUR },
   signInAddress: { points: 60, seconds: 15 * MINUTE },
-  signUpAddress: { points: 10, seconds: HOUR },
+  signUpAddress: { points: 20, seconds: HOUR },
   forgotAccount: { points: 3, seconds: HOUR },
   forgotAddress: { points: 20, seconds: HOUR },
   linkAddress: { points: 60, seconds: 15 * MINUTE },
@@ -76,4 +76,13 @@ export async function forgetAttempts(
   ...who: readonly string[]
 ): Promise<void> {
   await limiter(handle, name).delete(keyOf(who));
+}
+
+/** Gives back an attempt that turned out right, and keeps what others from there got wrong. */
+export async function giveAttemptBack(
+  handle: Handle,
+  name: LimitName,
+  ...who: readonly string[]
+): Promise<void> {
+  await limiter(handle, name).reward(keyOf(who), 1);
 }

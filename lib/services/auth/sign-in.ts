@@ -1,6 +1,6 @@
 import { findAccount } from '../../../db/queries/accounts';
 import { checkPassword } from '../../auth/password';
-import { forgetAttempts } from '../../auth/rate-limit';
+import { forgetAttempts, giveAttemptBack } from '../../auth/rate-limit';
 import { endSession, startSession } from '../../auth/session';
 import { nextPage, signInInput } from '../../contracts/auth';
 import { fail, ok } from '../../domain/result';
@@ -37,6 +37,7 @@ export const signIn = definePublicVerb({
     }
     await forgetAttempts(ctx.handle, 'signInAccountAndAddress', email, ctx.address);
     await forgetAttempts(ctx.handle, 'signInAccount', email);
+    await giveAttemptBack(ctx.handle, 'signInAddress', ctx.address);
     if (ctx.sessionToken) await endSession(ctx.handle, ctx.sessionToken);
     ctx.setSession(await startSession(ctx.handle, account.personId, ctx.clock.now()));
     await writeActivity(
