@@ -12,6 +12,8 @@ export const account = z.object({
   role,
   locale,
   companyName: z.string(),
+  timeZone: z.string(),
+  clock: z.enum(['12', '24']),
   sessions: z.array(
     z.object({ startedAt: z.iso.datetime(), expiresAt: z.iso.datetime(), isThisOne: z.boolean() }),
   ),

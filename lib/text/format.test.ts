@@ -3,6 +3,8 @@ import { describe, expect, it } from 'vitest';
 import {
   ageText,
   clockFigure,
+  clockOfMoment,
+  dayOfMoment,
   dayText,
   dayWithoutYear,
   decimalFigure,
@@ -160,6 +162,9 @@ describe('times', () => {
     expect(momentText('2026-06-14T05:00:00Z', { ...chicago, clock: '24' })).toBe(
       '14 Jun 2026, 00:00',
     );
+    expect(dayOfMoment('2026-06-14T03:05:00Z', 'America/Chicago')).toBe('2026-06-13');
+    expect(dayOfMoment('2026-06-14T03:05:00Z', 'UTC')).toBe('2026-06-14');
+    expect(clockOfMoment('2026-06-14T12:26:00Z', chicago)).toBe('7:26 am');
   });
 
   it.each([

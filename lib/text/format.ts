@@ -145,13 +145,10 @@ export function durationText(minutes: number): string {
   return rest === 0 ? `${Math.floor(minutes / 60)} h` : `${Math.floor(minutes / 60)} h ${rest} min`;
 }
 
-/** A moment (ISO 8601) in the company's time zone: "14 Jun 2026, 7:26 am". */
-export function momentText(
-  moment: string,
-  where: { readonly timeZone: string; readonly clock: ClockStyle; readonly locale?: Locale },
-): string {
+/** Day and clock minutes of a moment (ISO 8601) in a time zone. */
+function localParts(moment: string, timeZone: string): { day: PlainDate; minutes: ClockMinutes } {
   const parts = new Intl.DateTimeFormat('en-CA', {
-    timeZone: where.timeZone,
+    timeZone,
     year: 'numeric',
     month: '2-digit',
     day: '2-digit',
@@ -160,8 +157,31 @@ export function momentText(
     hourCycle: 'h23',
   }).formatToParts(new Date(moment));
   const part = (type: string) => parts.find((one) => one.type === type)?.value ?? '';
-  const day = `${part('year')}-${part('month')}-${part('day')}`;
-  const minutes = Number(part('hour')) * 60 + Number(part('minute'));
+  return {
+    day: `${part('year')}-${part('month')}-${part('day')}`,
+    minutes: Number(part('hour')) * 60 + Number(part('minute')),
+  };
+}
+
+/** The calendar day of a moment (ISO 8601) in a time zone, "2026-06-14". */
+export function dayOfMoment(moment: string, timeZone: string): PlainDate {
+  return localParts(moment, timeZone).day;
+}
+
+/** The clock time of a moment in the company's time zone: "7:26 am". */
+export function clockOfMoment(
+  moment: string,
+  where: { readonly timeZone: string; readonly clock: ClockStyle },
+): string {
+  return clockFigure(localParts(moment, where.timeZone).minutes, where.clock);
+}
+
+/** A moment (ISO 8601) in the company's time zone: "14 Jun 2026, 7:26 am". */
+export function momentText(
+  moment: string,
+  where: { readonly timeZone: string; readonly clock: ClockStyle; readonly locale?: Locale },
+): string {
+  const { day, minutes } = localParts(moment, where.timeZone);
   return `${dayText(day, where.locale)}, ${clockFigure(minutes, where.clock)}`;
 }
 

@@ -35,6 +35,8 @@ export async function readAccount({ scope, actor, company }: Ctx) {
     role: person.role,
     locale: person.locale,
     companyName: company.name,
+    timeZone: company.timeZone,
+    clock: company.clock,
     sessions: sessions.map((session) => ({
       startedAt: session.startedAt.toISOString(),
       expiresAt: session.expiresAt.toISOString(),
