@@ -9,6 +9,8 @@ const config = {
     '@node-rs/argon2',
     'pg',
     'pino',
+    // Loads drizzle's operators by a computed name, which no bundler can follow.
+    'rate-limiter-flexible',
     'sharp',
     'tesseract.js',
   ],
