@@ -113,15 +113,18 @@ export async function updateTicket(
 
 /**
  * Holds a supplier's ticket numbers until the transaction ends, so that two people who confirm
- * the same number at once do not both find it free. False when there is no such supplier.
+ * the same number at once do not both find it free. Null when there is no such supplier.
  */
-export async function holdTicketNumbers(scope: Scope, supplierId: string): Promise<boolean> {
-  const held = await scope.handle
-    .select({ id: suppliers.id })
+export async function holdTicketNumbers(
+  scope: Scope,
+  supplierId: string,
+): Promise<{ name: string; kind: 'readyMix' | 'pump' | 'material' } | null> {
+  const [held] = await scope.handle
+    .select({ name: suppliers.name, kind: suppliers.kind })
     .from(suppliers)
     .where(and(eq(suppliers.companyId, scope.companyId), eq(suppliers.id, supplierId)))
     .for('no key update');
-  return held.length === 1;
+  return held ?? null;
 }
 
 /** The supplier's ticket of that number which counts (not a rejected one), other than `exceptId`. */

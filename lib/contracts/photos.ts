@@ -110,7 +110,7 @@ export const uploadPhotoInput = z.strictObject({
   /** Another photo of a ticket that is there already; without it a new ticket begins. */
   ticketId: uuid.optional(),
   fileName: z.string(),
-  bytes: z.instanceof(Uint8Array),
+  bytes: z.custom<Uint8Array>((value) => value instanceof Uint8Array),
 });
 export const uploadPhotoOutput = z.object({
   ticketId: uuid,
@@ -121,7 +121,7 @@ export const uploadPhotoOutput = z.object({
 
 export const getPhotoInput = z.strictObject({ photoId: uuid });
 export const photoFile = z.object({
-  bytes: z.instanceof(Uint8Array),
+  bytes: z.custom<Uint8Array>((value) => value instanceof Uint8Array),
   mediaType: z.string(),
   fileName: z.string(),
   inline: z.boolean(),

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { clockMinutes, plainDate, uuid } from './common';
 import { pumpTicketRow } from './pump-tickets';
-import { ticketRow } from './tickets';
+import { ticketRow, timeStyle } from './tickets';
 
 const tally = {
   /** Yards on orders that were sent or confirmed; null where nothing was ordered. */
@@ -32,6 +32,8 @@ export const pourDayInput = z.strictObject({ day: plainDate.optional() });
 export const pourDay = z.object({
   day: plainDate,
   today: plainDate,
+  times: timeStyle,
+  neighbours: z.object({ before: plainDate.nullable(), after: plainDate.nullable() }),
   placements: z.array(z.object({ ...placementHead, ...tally })),
 });
 export type PourDay = z.infer<typeof pourDay>;
@@ -42,6 +44,7 @@ export const pourDayPlacement = z.object({
   ...tally,
   notes: z.string(),
   today: plainDate,
+  times: timeStyle,
   loads: z.array(ticketRow),
   pumpTickets: z.array(pumpTicketRow),
   orders: z.array(

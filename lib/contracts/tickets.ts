@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { MAX_LOAD_YD3 } from '../domain/tickets/limits';
 import { clockMinutes, decimalText, note, pageInput, pageOf, plainDate, uuid } from './common';
 import { photo, READING_STATES } from './photos';
 
@@ -14,9 +15,6 @@ export const CLOCK_FIELDS = [
   'leftAt',
 ] as const;
 export type ClockField = (typeof CLOCK_FIELDS)[number];
-
-/** No truck on a road carries more: a larger number is a slip of the reader or the finger. */
-export const MAX_LOAD_YD3 = 30;
 
 const shortText = z
   .string()
@@ -172,6 +170,9 @@ export const listTicketsOutput = pageOf(ticketRow);
 
 const named = z.object({ id: uuid, name: z.string() });
 
+/** How the company writes moments and clock times. */
+export const timeStyle = z.object({ timeZone: z.string(), clock: z.enum(['12', '24']) });
+
 export const ticketDetail = z.object({
   id: uuid,
   version: z.number().int(),
@@ -197,6 +198,7 @@ export const ticketDetail = z.object({
   leftAt: clockMinutes.nullable(),
   waterAddedGal: z.string().nullable(),
   notes: z.string(),
+  times: timeStyle,
   confirmedBy: z.string().nullable(),
   confirmedAt: z.iso.datetime().nullable(),
   photos: z.array(photo),

@@ -1,0 +1,54 @@
+import { listTickets } from '../../../db/queries/ticket-list';
+import { dayIn } from '../../clock';
+import { photoFile as fileAnswer } from '../../contracts/photos';
+import type { TicketRow } from '../../contracts/tickets';
+import { exportTicketsInput } from '../../contracts/tickets';
+import { ok } from '../../domain/result';
+import { clockText } from '../../domain/time/clock-minutes';
+import { csvText } from '../csv-text';
+import { defineVerb } from '../verb';
+import { crewLimit } from './internal';
+
+const time = (minutes: number | null) => (minutes === null ? '' : clockText(minutes));
+
+const COLUMNS: readonly [string, (row: TicketRow) => string | number | null][] = [
+  ['Date', (row) => row.date],
+  ['Ticket', (row) => row.number],
+  ['Supplier', (row) => row.supplierName],
+  ['Job number', (row) => row.jobNumber],
+  ['Job', (row) => row.jobName],
+  ['Placement', (row) => row.placementName],
+  ['Status', (row) => row.status],
+  ['Load', (row) => row.loadNumber],
+  ['Truck', (row) => row.truck],
+  ['Plant', (row) => row.plant],
+  ['Mix', (row) => row.mixCode],
+  ['Yards', (row) => row.quantityYd3],
+  ['Returned yards', (row) => row.returnedYd3],
+  ['Batched', (row) => time(row.batchedAt)],
+  ['Arrived', (row) => time(row.arrivedAt)],
+  ['Started', (row) => time(row.startedAt)],
+  ['Finished', (row) => time(row.finishedAt)],
+  ['Left', (row) => time(row.leftAt)],
+];
+
+export const exportTickets = defineVerb({
+  name: 'tickets.export',
+  says: 'All tickets that the filters let through, as a CSV file',
+  kind: 'read',
+  permission: 'tickets.read',
+  http: { method: 'GET', path: '/api/tickets/export' },
+  input: exportTicketsInput,
+  output: fileAnswer,
+  async run({ scope, actor, clock, company }, filters) {
+    const filter = { ...filters, crewMemberId: crewLimit(actor) };
+    const { rows } = await listTickets(scope, filter, { offset: 0, limit: null });
+    const lines = rows.map((row) => COLUMNS.map(([, read]) => read(row)));
+    return ok({
+      bytes: new TextEncoder().encode(csvText([COLUMNS.map(([title]) => title), ...lines])),
+      mediaType: 'text/csv; charset=utf-8',
+      fileName: `tickets-${dayIn(company.timeZone, clock.now())}.csv`,
+      inline: false,
+    });
+  },
+});
