@@ -1,4 +1,3 @@
-import { format, parseISO } from 'date-fns';
 import {
   billedTicket,
   findOrderTie,
@@ -14,6 +13,7 @@ import {
 } from '../../../db/queries/tickets';
 import type { Actor } from '../../auth/actor';
 import type { TicketInput } from '../../contracts/tickets';
+import { dayText, yardsWithUnit } from '../../text/format';
 import type { Ctx } from '../context';
 import type { Failure } from '../failure';
 import { failure, notFound } from '../failure';
@@ -21,10 +21,6 @@ import { failure, notFound } from '../failure';
 /** Whose crew a person's tickets are limited to; null for whoever sees all jobs. */
 export function crewLimit(actor: Actor): string | null {
   return actor.seesAllJobs ? null : actor.personId;
-}
-
-export function dayInWords(day: string): string {
-  return format(parseISO(day), 'd MMM yyyy');
 }
 
 /** "ticket 558142", or what to call one whose number nobody has confirmed. */
@@ -101,10 +97,10 @@ async function checkNumber(
       [{ path: 'number', message: 'already used on another job' }],
     );
   }
-  const yards = theirs.quantityYd3 ? `, ${theirs.quantityYd3} yd³` : '';
+  const yards = theirs.quantityYd3 ? `, ${yardsWithUnit(theirs.quantityYd3)}` : '';
   return failure(
     'conflict',
-    `Ticket ${wanted.number} of ${wanted.supplierName} is already here: ${dayInWords(theirs.date)}${yards}, ${theirs.jobName}. If this is a second photo of it, add the photo to that ticket; if not, check the number.`,
+    `Ticket ${wanted.number} of ${wanted.supplierName} is already here: ${dayText(theirs.date)}${yards}, ${theirs.jobName}. If this is a second photo of it, add the photo to that ticket; if not, check the number.`,
     [{ path: 'number', message: 'already used by another ticket' }],
   );
 }
