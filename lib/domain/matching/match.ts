@@ -20,6 +20,15 @@ export interface Match {
   readonly reason: string;
 }
 
+/**
+ * A person's own word about a billed line: the delivery it is for, or null for "none of them".
+ * The engine keeps it and looks no further for that line.
+ */
+export interface HandMatch {
+  readonly billLineId: string;
+  readonly delivery: Match['delivery'] | null;
+}
+
 export interface MatchResult {
   readonly matches: readonly Match[];
   readonly unmatchedLineIds: readonly string[];
