@@ -28,7 +28,9 @@ export interface TicketListFilter extends TicketFilters {
 
 /** A reading's field as text, without leaving SQL. */
 function readText(field: string): SQL<string | null> {
-  return sql<string | null>`${readings.fields} #>> ${`{${field},value}`}::text[]`;
+  return sql<
+    string | null
+  >`jsonb_extract_path_text(${readings.fields}, 'fields', ${field}, 'value')`;
 }
 
 function matching(scope: Scope, filter: TicketListFilter): SQL | undefined {
@@ -171,7 +173,7 @@ async function withReadings(scope: Scope, rows: BareRow[]): Promise<TicketRow[]>
       truck: readText('truck'),
       doubtful: sql<string>`(
         select count(*)::text
-        from jsonb_each(coalesce(${readings.fields}, '{}'::jsonb)) as field
+        from jsonb_each(coalesce(${readings.fields} -> 'fields', '{}'::jsonb)) as field
         where (field.value ->> 'doubtful')::boolean
       )`,
     })

@@ -1,53 +1,9 @@
 import { z } from 'zod';
+import { boxSchema, readingNoteSchema, ticketFieldsSchema } from '../../importers/ocr/reading';
 import { uuid } from './common';
 
 export const MAX_PHOTO_BYTES = 20 * 1024 * 1024;
 export const MAX_PHOTO_PIXELS = 50_000_000;
-
-/** What the reader looks for on a ticket; a field that is not on the ticket is absent. */
-export const READ_FIELDS = [
-  'ticketNumber',
-  'supplierName',
-  'date',
-  'plant',
-  'truck',
-  'orderNumber',
-  'poNumber',
-  'jobName',
-  'mixCode',
-  'quantityYd3',
-  'orderedYd3',
-  'toDateYd3',
-  'loadNumber',
-  'batchedAt',
-  'arrivedAt',
-  'startedAt',
-  'finishedAt',
-  'leftAt',
-  'waterAddedGal',
-] as const;
-export type ReadFieldName = (typeof READ_FIELDS)[number];
-
-/** Where a field stands on the upright photo, in its pixels. */
-export const photoBox = z.object({
-  x: z.number(),
-  y: z.number(),
-  width: z.number(),
-  height: z.number(),
-});
-export type PhotoBox = z.infer<typeof photoBox>;
-
-export const readField = z.object({
-  value: z.string(),
-  /** 0 to 1. */
-  confidence: z.number(),
-  doubtful: z.boolean(),
-  box: photoBox.nullable(),
-});
-export type ReadField = z.infer<typeof readField>;
-
-export const readFields = z.partialRecord(z.enum(READ_FIELDS), readField);
-export type ReadFields = z.infer<typeof readFields>;
 
 /** The fields of a ticket that a reading can fill in, by the form's names. */
 export const SUGGESTED_FIELDS = [
@@ -77,7 +33,7 @@ export const suggestion = z.object({
   /** Fields that a person has to look at before the ticket is confirmed. */
   doubtful: z.array(z.enum(SUGGESTED_FIELDS)),
   /** Where each field stands on the photo. */
-  boxes: z.partialRecord(z.enum(SUGGESTED_FIELDS), photoBox),
+  boxes: z.partialRecord(z.enum(SUGGESTED_FIELDS), boxSchema),
 });
 export type Suggestion = z.infer<typeof suggestion>;
 
@@ -89,7 +45,9 @@ export const reading = z.object({
   /** Why nothing could be read, and in words; null unless the state is `failed`. */
   failureCode: z.string().nullable(),
   failureSentence: z.string().nullable(),
-  fields: readFields.nullable(),
+  fields: ticketFieldsSchema.nullable(),
+  /** What else a person should know about the photo. */
+  notes: z.array(readingNoteSchema),
   suggestion: suggestion.nullable(),
 });
 export type Reading = z.infer<typeof reading>;

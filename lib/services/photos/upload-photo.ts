@@ -38,11 +38,10 @@ export const uploadPhoto = defineVerb({
     const placement = await findPlacement(ctx.scope, input.placementId, crewLimit(ctx.actor));
     if (!placement) return fail(notFound('placement'));
     const known = (await sentBefore(ctx, input)) ?? (await sameBytes(ctx, input, sha256));
-    if (known) {
-      if (known.ok) ctx.unchanged();
-      return known;
-    }
+    if (known) return repeated(ctx, known);
     const ticket = await ticketOf(ctx, input, placement);
+    // Lost the race against the same upload: its answer is ours too.
+    if (!ticket) return repeated(ctx, (await sentBefore(ctx, input)) ?? fail(notFound('photo')));
     if (!ticket.ok) return ticket;
     const photoId = newId<'photo'>();
     await insertPhoto(
@@ -69,6 +68,11 @@ export const uploadPhoto = defineVerb({
     return ok({ ticketId: ticket.value.id, photoId, repeated: false });
   },
 });
+
+function repeated(ctx: Ctx, answer: Result<Answer, Failure>): Result<Answer, Failure> {
+  if (answer.ok) ctx.unchanged();
+  return answer;
+}
 
 /** The answer to a repeat of an upload whose first answer was lost; null for a new one. */
 async function sentBefore(ctx: Ctx, input: Upload): Promise<Result<Answer, Failure> | null> {
@@ -106,12 +110,12 @@ async function sameBytes(
   );
 }
 
-/** The ticket that the photo belongs to: the one named, or a new one to check. */
+/** The photo's ticket: the one named, or a new one to check; null where that was just begun. */
 async function ticketOf(
   ctx: Ctx,
   input: Upload,
   placement: { readonly id: string; readonly jobId: string; readonly pourDate: string },
-): Promise<Result<Pick<StoredTicket, 'id' | 'number'>, Failure>> {
+): Promise<Result<Pick<StoredTicket, 'id' | 'number'>, Failure> | null> {
   if (input.ticketId !== undefined) {
     const named = await findTicket(ctx.scope, input.ticketId, crewLimit(ctx.actor));
     return named && named.placementId === placement.id ? ok(named) : fail(notFound('ticket'));
@@ -123,8 +127,5 @@ async function ticketOf(
     status: 'toCheck',
     date: placement.pourDate,
   });
-  if (added) return ok({ id, number: '' });
-  return fail(
-    failure('conflict', 'This photo is being sent already. Wait a moment and look again.'),
-  );
+  return added ? ok({ id, number: '' }) : null;
 }

@@ -1,4 +1,9 @@
-import { findTicket, findTicketByClient, insertTicket } from '../../../db/queries/tickets';
+import {
+  findTicket,
+  findTicketByClient,
+  holdTicketNumbers,
+  insertTicket,
+} from '../../../db/queries/tickets';
 import { createTicketInput, ticketDetail as output } from '../../contracts/tickets';
 import { fail, ok } from '../../domain/result';
 import { newId } from '../../ids';
@@ -16,6 +21,8 @@ export const createTicket = defineVerb({
   input: createTicketInput,
   output,
   async run(ctx, { clientId, ...input }) {
+    // Held first: the same send twice at once then meets its own first ticket, not a taken number.
+    await holdTicketNumbers(ctx.scope, input.supplierId);
     const earlier = await findTicketByClient(ctx.scope, clientId);
     if (earlier) {
       const ticket = await findTicket(ctx.scope, earlier.id, crewLimit(ctx.actor));

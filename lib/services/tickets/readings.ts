@@ -2,8 +2,8 @@ import type { PhotoWithReading } from '../../../db/queries/photos';
 import { ordersOfPlacements, supplierNames } from '../../../db/queries/ticket-ties';
 import type { StoredTicket } from '../../../db/queries/tickets';
 import type { Scope } from '../../../db/tx';
+import { ticketReadingSchema } from '../../../importers/ocr/reading';
 import type { Photo, Reading } from '../../contracts/photos';
-import { readFields } from '../../contracts/photos';
 import type { PourContext } from '../../domain/tickets/suggest-ticket';
 import { suggestTicket } from '../../domain/tickets/suggest-ticket';
 
@@ -40,13 +40,14 @@ export function photoAnswer(found: PhotoWithReading, context: PourContext): Phot
 
 export function readingAnswer(found: PhotoWithReading, context: PourContext): Reading {
   const { photo, reading } = found;
-  const fields = reading?.state === 'read' ? readFields.parse(reading.fields) : null;
+  const read = reading?.state === 'read' ? ticketReadingSchema.parse(reading.fields) : null;
   return {
     photoId: photo.id,
     state: reading?.state ?? 'waiting',
     failureCode: reading?.failureCode ?? null,
     failureSentence: reading?.failureSentence ?? null,
-    fields,
-    suggestion: fields ? suggestTicket(fields, context) : null,
+    fields: read?.fields ?? null,
+    notes: read?.notes ?? [],
+    suggestion: read ? suggestTicket(read.fields, context) : null,
   };
 }
