@@ -39,7 +39,7 @@ function Hint({ id, children }: { id: string; children: ReactNode }) {
 
 function FieldError({ id, children }: { id: string; children: ReactNode }) {
   return (
-    <p id={id} className="mt-1 text-[13px] font-semibold text-keel">
+    <p id={id} className="mt-1 text-[13px] font-semibold text-keel first-letter:uppercase">
       {children}
     </p>
   );

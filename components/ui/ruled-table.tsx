@@ -20,11 +20,22 @@ interface RuledTableProps {
   caption: ReactNode;
   showCaption?: boolean;
   children: ReactNode;
+  /** On a phone each row becomes a slip of its own lines, for lists that are read, not compared. */
+  slipsOnPhone?: boolean;
   className?: string;
 }
 
+const SLIPS =
+  'max-md:block [&_thead]:max-md:hidden [&_tbody]:max-md:block [&_tr]:max-md:block [&_tr]:max-md:border-b [&_tr]:max-md:border-cured [&_tr]:max-md:py-2 [&_td]:max-md:block [&_td]:max-md:border-0 [&_td]:max-md:px-4 [&_td]:max-md:py-0.5 [&_td]:max-md:text-left';
+
 /** A ledger's table: rules between rows, figures right-aligned; scrolls sideways by itself. */
-export function RuledTable({ caption, showCaption = false, children, className }: RuledTableProps) {
+export function RuledTable({
+  caption,
+  showCaption = false,
+  slipsOnPhone = false,
+  children,
+  className,
+}: RuledTableProps) {
   return (
     <section
       className="relative overflow-x-auto"
@@ -35,6 +46,7 @@ export function RuledTable({ caption, showCaption = false, children, className }
       <table
         className={classNames(
           'w-full border-collapse text-[14.5px] [&_tfoot_td]:border-t-[3px] [&_tfoot_td]:border-double [&_tfoot_td]:border-wet [&_tfoot_td]:font-semibold',
+          slipsOnPhone && SLIPS,
           className,
         )}
       >

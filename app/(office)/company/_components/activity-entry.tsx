@@ -2,7 +2,7 @@
 
 import Link from 'next/link';
 import { fieldDifferences } from '@/components/evidence/differences';
-import { useWhere } from '@/components/ui/where';
+import { Moment, useWhere } from '@/components/ui/where';
 import type { ActivityRow } from '@/lib/contracts/activity';
 import { clockOfMoment } from '@/lib/text/format';
 import { company } from '@/lib/text/messages/en/company';
@@ -18,16 +18,19 @@ function fieldName(path: string): string {
     .join(' › ');
 }
 
+const ISO_MOMENT = /^\d{4}-\d{2}-\d{2}T[\d:.]+Z$/;
+
 function Value({ text }: { text: string | null }) {
   if (text === null) return <span className="text-ink-soft">{words.nothing}</span>;
   if (text === 'true') return words.yes;
   if (text === 'false') return words.no;
+  if (ISO_MOMENT.test(text)) return <Moment at={text} />;
   return <span className="break-words">{text}</span>;
 }
 
 export function ActivityEntry({ row }: { row: ActivityRow }) {
   const where = useWhere();
-  const differences = fieldDifferences(row.before, row.after);
+  const differences = fieldDifferences(row.before, row.after).filter(({ path }) => path !== 'id');
   const page = entityPage(row.entity, row.entityId);
   return (
     <li className="grid grid-cols-[5.2rem_1fr] gap-x-3 border-b border-cured py-2 text-[14.5px]">
@@ -42,7 +45,7 @@ export function ActivityEntry({ row }: { row: ActivityRow }) {
         </p>
         {differences.length > 0 && (
           <details className="mt-1">
-            <summary className="inline-block py-1 text-[13px] text-carbon">
+            <summary className="w-fit py-1 text-[13px] text-carbon">
               {words.changes(differences.length)}
             </summary>
             <div className="overflow-x-auto">

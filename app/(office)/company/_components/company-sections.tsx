@@ -18,14 +18,14 @@ export function CompanySections() {
   const pathname = usePathname();
   return (
     <nav aria-label={words.kind} className="overflow-x-auto border-b border-cured bg-band">
-      <ul className="flex px-1.5 md:px-3.5">
+      <ul className="flex px-2 md:px-3.5">
         {SECTIONS.map((section) => (
           <li key={section.name} className="shrink-0">
             <Link
               href={section.href}
               aria-current={section.href === pathname ? 'page' : undefined}
               className={classNames(
-                'flex min-h-11 items-center px-2.5 text-[14.5px] no-underline -outline-offset-3 md:min-h-9',
+                'flex min-h-11 items-center px-2 text-[14.5px] md:px-2.5 no-underline -outline-offset-3 md:min-h-9',
                 section.href === pathname
                   ? 'font-semibold text-ink shadow-[inset_0_-3px_0_var(--carbon)]'
                   : 'text-ink-soft hover:text-ink',

@@ -19,7 +19,7 @@ export function KeyTable({ rows, onRevoke }: KeyTableProps) {
   const { timeZone } = useWhere();
   const day = (moment: string) => dayText(dayOfMoment(moment, timeZone));
   return (
-    <RuledTable caption={words.title}>
+    <RuledTable caption={words.title} slipsOnPhone>
       <thead>
         <tr>
           <Th>{words.column.name}</Th>
@@ -34,12 +34,15 @@ export function KeyTable({ rows, onRevoke }: KeyTableProps) {
       <tbody>
         {rows.map((key) => (
           <tr key={key.id} className={classNames(key.revokedAt && 'text-ink-soft')}>
-            <Td>{key.name}</Td>
+            <Td className="font-semibold">{key.name}</Td>
             <Td className="font-code">…{key.lastFour}</Td>
             <Td className="whitespace-nowrap">
               {day(key.issuedAt)} · {key.issuedBy}
             </Td>
-            <Td>{key.lastUsedAt ? <Moment at={key.lastUsedAt} /> : words.never}</Td>
+            <Td>
+              <span className="text-ink-soft md:hidden">{words.column.used}: </span>
+              {key.lastUsedAt ? <Moment at={key.lastUsedAt} /> : words.never}
+            </Td>
             <Td align="right" className="whitespace-nowrap">
               {key.revokedAt ? (
                 words.revokedOn(day(key.revokedAt))

@@ -93,8 +93,8 @@ interface MessageTableProps {
 
 function MessageTable({ rows, onOpen }: MessageTableProps) {
   return (
-    <RuledTable caption={words.title}>
-      <thead className="hidden md:table-header-group">
+    <RuledTable caption={words.title} slipsOnPhone>
+      <thead>
         <tr>
           <Th>{words.subject}</Th>
           <Th>{words.to}</Th>
@@ -102,13 +102,10 @@ function MessageTable({ rows, onOpen }: MessageTableProps) {
           <Th>{words.state}</Th>
         </tr>
       </thead>
-      <tbody className="block md:table-row-group">
+      <tbody>
         {rows.map((mail) => (
-          <tr
-            key={mail.id}
-            className="block border-b border-cured py-2 md:table-row md:border-0 md:py-0 [&_td]:block [&_td]:border-0 [&_td]:px-4 [&_td]:py-0.5 md:[&_td]:table-cell md:[&_td]:border-b md:[&_td]:px-2.5 md:[&_td]:py-2"
-          >
-            <Td className="md:first:pl-6">
+          <tr key={mail.id}>
+            <Td>
               <button
                 type="button"
                 onClick={() => onOpen(mail.id)}

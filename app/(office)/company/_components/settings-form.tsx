@@ -31,7 +31,7 @@ export function SettingsForm({ company: stored }: { company: CompanySettingsRow 
   const { register, errorOf } = state;
   const { isDirty } = state.form.formState;
   return (
-    <ApiForm state={state} className="max-w-5xl">
+    <ApiForm state={state} className="[&>section]:max-w-5xl">
       <Section title={words.company}>
         <div className="grid gap-4 md:grid-cols-[2fr_2fr_1.2fr]">
           <TextField label={words.name} {...register('name')} error={errorOf('name')} />

@@ -6,7 +6,7 @@ export const company = {
     people: 'People',
     outbox: 'Outbox',
     activity: 'Activity',
-    keys: 'Access keys',
+    keys: 'Keys',
   },
   timeZone: 'Time zone',
   clock: 'Clock',
