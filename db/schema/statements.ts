@@ -52,6 +52,7 @@ export const importLayouts = pgTable(
   {
     ...companyRecord(),
     supplierId: uuid('supplier_id').notNull(),
+    /** Hash of the titles, which can be longer than an index takes. */
     headerSignature: text('header_signature').notNull(),
     layout: jsonb('layout').notNull(),
   },
@@ -83,6 +84,8 @@ export const statements = pgTable(
       .default('open'),
     closedAt: moment('closed_at'),
     closedBy: uuid('closed_by'),
+    /** The rows of the strike-off sheet as they stood at closing; later facts don't change them. */
+    closedRows: jsonb('closed_rows'),
   },
   (t) => [
     unique('statements_company_id').on(t.companyId, t.id),
@@ -211,6 +214,8 @@ export const variances = pgTable(
     supplierId: uuid('supplier_id').notNull(),
     statementId: uuid('statement_id').notNull(),
     key: text('key').notNull(),
+    /** The row of the strike-off sheet that it stands on. */
+    rowKey: text('row_key').notNull(),
     kind: text('kind', { enum: VARIANCE_KINDS }).notNull(),
     billLineId: uuid('bill_line_id'),
     ticketId: uuid('ticket_id'),

@@ -1,0 +1,2 @@
+ALTER TABLE "statements" ADD COLUMN "closed_rows" jsonb;--> statement-breakpoint
+ALTER TABLE "variances" ADD COLUMN "row_key" text NOT NULL;
