@@ -7,6 +7,7 @@ import { drizzle as drizzlePglite } from 'drizzle-orm/pglite';
 import pg from 'pg';
 import type { Env } from '../lib/env';
 import { readEnv } from '../lib/env';
+import { log } from '../lib/log';
 import { DurableNodeFS } from './durable-fs';
 import { lockDataFolder } from './lock';
 import { migrateStore } from './migrate';
@@ -25,7 +26,14 @@ export interface Store {
   close(): Promise<void>;
 }
 
-const memo = globalThis as { strikeoffStore?: Promise<Store> };
+/** Data folders of another major version need a dump and a restore, which the engine won't say. */
+const ENGINE_MAJOR = '18';
+
+const memo = globalThis as {
+  strikeoffStore?: Promise<Store>;
+  strikeoffClosing?: Promise<void>;
+  strikeoffIsStopping?: boolean;
+};
 
 /**
  * The process's one store, opened on first use and migrated. Module state would not do: the
@@ -35,18 +43,33 @@ export function openStore(env: Env = readEnv()): Promise<Store> {
   if (process.env.NEXT_PHASE === 'phase-production-build') {
     throw new Error('The database must not be opened while the application is being built.');
   }
-  memo.strikeoffStore ??= open(env).catch((error: unknown) => {
-    delete memo.strikeoffStore;
-    throw error;
-  });
+  if (memo.strikeoffIsStopping) return Promise.reject(new Error('The server is stopping.'));
+  memo.strikeoffStore ??= (memo.strikeoffClosing ?? Promise.resolve())
+    .then(() => open(env))
+    .catch((error: unknown) => {
+      delete memo.strikeoffStore;
+      throw error;
+    });
   return memo.strikeoffStore;
 }
 
 /** Closes the store if it is open; the next `openStore` opens it anew. */
 export async function closeStore(): Promise<void> {
   const open = memo.strikeoffStore;
+  if (!open) return memo.strikeoffClosing;
   delete memo.strikeoffStore;
-  if (open) await (await open).close();
+  memo.strikeoffClosing = open
+    .then((store) => store.close())
+    .finally(() => {
+      delete memo.strikeoffClosing;
+    });
+  await memo.strikeoffClosing;
+}
+
+/** Closes the store and keeps it closed: a request that comes late must not open it again. */
+export async function closeStoreForGood(): Promise<void> {
+  memo.strikeoffIsStopping = true;
+  await closeStore();
 }
 
 async function open(env: Env): Promise<Store> {
@@ -61,7 +84,14 @@ async function open(env: Env): Promise<Store> {
 }
 
 function openPostgres(url: string): Store {
-  const pool = new pg.Pool({ connectionString: url, max: 10 });
+  const pool = new pg.Pool({
+    connectionString: url,
+    max: 10,
+    connectionTimeoutMillis: 10_000,
+    idle_in_transaction_session_timeout: 60_000,
+  });
+  // A connection that breaks while nobody uses it would otherwise end the process.
+  pool.on('error', (error) => log.warn({ err: error }, 'an idle database connection broke'));
   return {
     kind: 'postgres',
     handle: drizzlePg({ client: pool }) as unknown as Handle,
@@ -72,39 +102,62 @@ function openPostgres(url: string): Store {
 
 async function openEmbedded(dataDir: string): Promise<Store> {
   const lock = lockDataFolder(dataDir);
-  const folder = path.join(dataDir, 'database');
-  fs.mkdirSync(folder, { recursive: true });
-  const files = new DurableNodeFS(folder);
-  let engine: PGlite | undefined;
+  let engine: PGlite;
   try {
-    engine = await PGlite.create({
-      fs: files,
-      startParams: [
-        ...PGlite.defaultStartParams.filter((parameter) => parameter !== '-F'),
-        ...['-c', 'wal_sync_method=fsync'],
-        ...['-c', 'max_wal_size=64MB', '-c', 'min_wal_size=32MB'],
-      ],
-    });
-    await proveDurable(engine, files);
+    engine = await startEngine(path.join(dataDir, 'database'));
   } catch (error) {
-    await engine?.close();
     lock.release();
     throw error;
   }
-  const opened = engine;
   return {
     kind: 'pglite',
-    handle: drizzlePglite({ client: opened }) as unknown as Handle,
-    engine: opened,
+    handle: drizzlePglite({ client: engine }) as unknown as Handle,
+    engine,
     async close() {
       try {
-        await opened.exec('CHECKPOINT');
-        await opened.close();
+        await engine.exec('CHECKPOINT');
+        await engine.close();
       } finally {
         lock.release();
       }
     },
   };
+}
+
+/**
+ * Starts the embedded database on a folder, new or not, or on a dump of one. The caller holds
+ * the data folder's lock.
+ */
+export async function startEngine(folder: string, dump?: Blob): Promise<PGlite> {
+  refuseOtherMajor(folder);
+  fs.mkdirSync(folder, { recursive: true });
+  const files = new DurableNodeFS(folder);
+  const engine = await PGlite.create({
+    fs: files,
+    ...(dump ? { loadDataDir: dump } : {}),
+    startParams: [
+      ...PGlite.defaultStartParams.filter((parameter) => parameter !== '-F'),
+      ...['-c', 'wal_sync_method=fsync'],
+      ...['-c', 'max_wal_size=64MB', '-c', 'min_wal_size=32MB'],
+    ],
+  });
+  try {
+    await proveDurable(engine, files);
+  } catch (error) {
+    await engine.close();
+    throw error;
+  }
+  return engine;
+}
+
+function refuseOtherMajor(folder: string): void {
+  const file = path.join(folder, 'PG_VERSION');
+  const major = fs.existsSync(file) ? fs.readFileSync(file, 'utf8').trim() : ENGINE_MAJOR;
+  if (major === ENGINE_MAJOR) return;
+  throw new Error(
+    `The database in ${folder} is of version ${major} and this program reads version ` +
+      `${ENGINE_MAJOR}. Start the program that wrote it, or restore a backup made by this one.`,
+  );
 }
 
 /** Refuses to start where a commit does not reach the disk: the hook leans on internals. */

@@ -1,3 +1,4 @@
+import { existsSync } from 'node:fs';
 import path from 'node:path';
 import { sql } from 'drizzle-orm';
 import { migrate as migratePg } from 'drizzle-orm/node-postgres/migrator';
@@ -9,6 +10,9 @@ const MIGRATION_LOCK = 70_2606;
 /** Brings the store to the newest schema. On a server, one process at a time. */
 export async function migrateStore(store: Store): Promise<void> {
   const migrationsFolder = path.join(process.cwd(), 'db', 'migrations');
+  if (!existsSync(migrationsFolder)) {
+    throw new Error(`${migrationsFolder} is missing: start Strikeoff in its own folder.`);
+  }
   if (store.kind === 'pglite') {
     await migratePglite(store.handle as unknown as Parameters<typeof migratePglite>[0], {
       migrationsFolder,

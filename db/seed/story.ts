@@ -19,8 +19,6 @@ export type JobKey =
 
 export const COMPANY = { name: 'Bluestem Flatwork', timeZone: 'America/Chicago' } as const;
 
-export const DEMO_PASSWORD = 'strike the slab';
-
 export const PEOPLE = [
   { key: 'owner', name: 'Ruth Okafor', email: 'ruth@bluestem.example', role: 'owner' },
   { key: 'bookkeeper', name: 'Dana Whitfield', email: 'dana@bluestem.example', role: 'bookkeeper' },

@@ -1,4 +1,4 @@
-import { sendMail } from '../mail/send-mail';
+import { sendMail } from './send-mail';
 import type { Handler, WorkKind } from './work-item';
 
 /** Who does which work. Items of a kind that is not listed stay waiting. */

@@ -5,12 +5,12 @@ import { afterAll, afterEach, beforeAll, beforeEach, expect, test } from 'vitest
 import type { Store } from '../../db/client';
 import { outbox, workItems } from '../../db/schema/activity';
 import { newId } from '../../lib/ids';
-import { sendMail } from '../../lib/mail/send-mail';
 import { invitationMail, orderMail } from '../../lib/mail/templates';
 import { writeMail } from '../../lib/mail/write-mail';
 import { getMail } from '../../lib/services/outbox/get-mail';
 import { callVerb } from '../../lib/services/verb';
 import { backOffMs, claimNext, freeAll } from '../../lib/work/queue';
+import { sendMail } from '../../lib/work/send-mail';
 import type { WorkItem } from '../../lib/work/work-item';
 import { GiveUp } from '../../lib/work/work-item';
 import { doNext, startWorker } from '../../lib/work/worker';

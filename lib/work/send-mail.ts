@@ -4,8 +4,8 @@ import type { Store } from '../../db/client';
 import { outbox } from '../../db/schema/activity';
 import type { Clock } from '../clock';
 import { readEnv } from '../env';
-import type { WorkItem } from '../work/work-item';
-import { GiveUp } from '../work/work-item';
+import type { WorkItem } from './work-item';
+import { GiveUp } from './work-item';
 
 const SERVICE_TIMEOUT_MS = 30_000;
 

@@ -1,0 +1,4 @@
+import { healthResponse } from '@/lib/http/health';
+
+export const dynamic = 'force-dynamic';
+export const GET = healthResponse;
