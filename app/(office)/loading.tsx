@@ -7,7 +7,7 @@ export default function Loading() {
   const words = useCommon();
   return (
     <div role="status" aria-label={words.loading}>
-      <div aria-hidden className="busy-rule h-[3px]" />
+      <div aria-hidden className="busy-rule h-[3px] text-carbon" />
       <div aria-hidden className="double-rule px-4 pt-4 pb-3 md:px-6">
         <div className="h-3 w-24 bg-tab" />
         <div className="mt-2 h-6 w-64 max-w-full bg-tab" />

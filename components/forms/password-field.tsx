@@ -16,6 +16,7 @@ export function PasswordField({ showLabel, hideLabel, ...field }: PasswordFieldP
     <div className="relative">
       <TextField
         {...field}
+        hint={field.error ? undefined : field.hint}
         type={shown ? 'text' : 'password'}
         autoCapitalize="none"
         spellCheck={false}

@@ -20,7 +20,7 @@ const SIZES: Record<Size, string> = {
 function looks(variant: Variant, size: Size, className?: string): string {
   return classNames(
     'inline-flex items-center justify-center gap-2 rounded-[3px] border font-semibold leading-tight',
-    'no-underline select-none aria-disabled:opacity-60 aria-disabled:cursor-default',
+    'no-underline select-none aria-disabled:cursor-default',
     VARIANTS[variant],
     SIZES[size],
     className,
@@ -53,14 +53,18 @@ export function Button(props: ButtonProps) {
       type={type}
       aria-disabled={still || undefined}
       aria-busy={pending || undefined}
-      className={classNames(looks(variant, size, className), 'relative overflow-hidden')}
+      className={classNames(
+        looks(variant, size, className),
+        'relative overflow-hidden',
+        disabled && !pending && 'opacity-60',
+      )}
       onClick={(event) => {
         if (still) event.preventDefault();
         else onClick?.(event);
       }}
     >
       {children}
-      {pending && <span aria-hidden className="busy-rule absolute inset-x-0 bottom-0 h-1 invert" />}
+      {pending && <span aria-hidden className="busy-rule absolute inset-x-0 bottom-0 h-1" />}
     </button>
   );
 }

@@ -55,7 +55,7 @@ export function ConfirmDialog(props: ConfirmDialogProps) {
           <Button variant={danger ? 'danger' : 'primary'} pending={pending} onClick={act}>
             {confirm}
           </Button>
-          <Button variant="quiet" onClick={close}>
+          <Button variant="quiet" onClick={close} data-first-focus={danger || undefined}>
             {words.cancel}
           </Button>
         </>

@@ -15,7 +15,7 @@ export function CopyTag({ copy, className }: { copy: keyof typeof LOOKS; classNa
   return (
     <span
       className={classNames(
-        'inline-block border px-1.5 py-px text-[12.5px] font-semibold text-ink',
+        'inline-block h-fit w-fit border px-1.5 py-px text-[12.5px] font-semibold text-ink',
         LOOKS[copy],
         className,
       )}

@@ -22,7 +22,10 @@ export function Dialog({ open, onClose, title, children, footer }: DialogProps) 
   useEffect(() => {
     const element = dialog.current;
     if (!element) return;
-    if (open && !element.open) element.showModal();
+    if (open && !element.open) {
+      element.showModal();
+      element.querySelector<HTMLElement>('[data-first-focus]')?.focus();
+    }
     if (!open && element.open) element.close();
   }, [open]);
   return (
@@ -40,19 +43,11 @@ export function Dialog({ open, onClose, title, children, footer }: DialogProps) 
       className="m-auto w-[min(100vw-2rem,34rem)] border border-wet bg-sheet p-0 text-ink"
     >
       {open && (
-        <div className="flex max-h-[85dvh] flex-col">
-          <header className="double-rule flex items-start gap-4 px-5 pt-4 pb-3">
+        <div className="relative flex max-h-[85dvh] flex-col">
+          <header className="double-rule py-3.5 pr-14 pl-5">
             <h2 id={titleId} className="text-xl">
               {title}
             </h2>
-            <button
-              type="button"
-              onClick={onClose}
-              aria-label={words.close}
-              className="-mt-2 -mr-3 ml-auto grid size-11 shrink-0 place-content-center text-2xl leading-none text-ink-soft hover:text-ink"
-            >
-              <span aria-hidden>×</span>
-            </button>
           </header>
           <div className="min-h-0 overflow-y-auto px-5 py-4">{children}</div>
           {footer && (
@@ -60,6 +55,15 @@ export function Dialog({ open, onClose, title, children, footer }: DialogProps) 
               {footer}
             </footer>
           )}
+          {/* Last, so that focus starts at what the slip is about. */}
+          <button
+            type="button"
+            onClick={onClose}
+            aria-label={words.close}
+            className="absolute top-2 right-2 grid size-11 place-content-center text-2xl leading-none text-ink-soft hover:text-ink"
+          >
+            <span aria-hidden>×</span>
+          </button>
         </div>
       )}
     </dialog>

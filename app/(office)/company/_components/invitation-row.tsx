@@ -26,7 +26,7 @@ export function InvitationRow({ invitation, onWithdrawn }: InvitationRowProps) {
   });
   return (
     <li className="flex flex-wrap items-center justify-between gap-x-4 gap-y-2 border-b border-cured py-2.5">
-      <div className="min-w-0">
+      <div className="min-w-0 flex-1 basis-64">
         <p>
           <span className="font-semibold">{invitation.name}</span>
           <span className="text-ink-soft"> · {common.roles[invitation.role]}</span>
