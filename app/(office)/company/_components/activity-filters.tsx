@@ -21,6 +21,7 @@ export function ActivityFilters({ filter, people, entities }: ActivityFiltersPro
   });
   return (
     <search
+      data-no-print
       aria-label={words.title}
       className="grid grid-cols-2 gap-3 md:grid-cols-[1.4fr_1fr_1fr_auto_auto]"
     >

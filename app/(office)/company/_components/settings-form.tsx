@@ -65,7 +65,10 @@ export function SettingsForm({ company: stored }: { company: CompanySettingsRow 
       <Section title={words.tolerances} says={words.tolerancesSays}>
         <ToleranceTable register={register} errorOf={errorOf} />
       </Section>
-      <div className="sticky bottom-0 mt-4 flex flex-wrap items-center gap-4 border-t border-wet bg-band px-4 py-3 md:px-6">
+      <div
+        data-no-print
+        className="sticky bottom-0 mt-4 flex flex-wrap items-center gap-4 border-t border-wet bg-band px-4 py-3 md:px-6"
+      >
         <Button type="submit" pending={state.pending}>
           {words.save}
         </Button>

@@ -52,7 +52,10 @@ export function ToleranceTable({ register, errorOf }: ToleranceTableProps) {
               </span>
             </div>
             {problem && (
-              <p id={problemId} className="mt-1 text-right text-[13px] font-semibold text-keel">
+              <p
+                id={problemId}
+                className="mt-1 text-right text-[13px] font-semibold text-keel first-letter:uppercase"
+              >
                 {problem}
               </p>
             )}
