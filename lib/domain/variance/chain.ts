@@ -1,0 +1,58 @@
+import type { Money } from '../money/money';
+import { dollars } from '../words';
+import { type DraftFinding, withinSlack } from './draft';
+
+/**
+ * One cause by which a billed amount leaves the expected one. `reached` is what the line would
+ * come to with this cause and those before it: delivered × agreed, billed yards × agreed, billed
+ * yards × billed price, the printed amount. Each cause's dollars are the step it adds, so that
+ * they add up to the line's difference and none is counted twice.
+ */
+export interface Cause {
+  readonly kind: DraftFinding['kind'];
+  readonly present: boolean;
+  readonly reached: Money;
+  readonly sentence: string;
+  readonly steps: DraftFinding['steps'];
+}
+
+/**
+ * The findings of a line by its causes. A line within two cents of what it should be agrees,
+ * whatever its parts; cents that no cause explains go with the last one that is present.
+ */
+export function findingsOf(
+  expected: Money,
+  causes: readonly Cause[],
+  amount: Money,
+  clauseId: string | null,
+): DraftFinding[] {
+  if (withinSlack(expected, amount)) return [];
+  const present = causes.filter((cause) => cause.present);
+  let from = expected;
+  return present.map(({ kind, reached, sentence, steps }, at) => {
+    const to = at === present.length - 1 ? amount : reached;
+    const finding = { kind, expected: from, billed: to, clauseId, sentence, steps };
+    from = to;
+    return finding;
+  });
+}
+
+/** The cause that remains when quantity × price is not the printed amount. */
+export function arithmeticCause(
+  name: string,
+  extended: Money | null,
+  amount: Money,
+  arithmetic: string,
+): Cause {
+  const said = extended === null ? '' : `${arithmetic} = ${dollars(extended)}`;
+  return {
+    kind: 'arithmeticWrong',
+    present: extended !== null && !withinSlack(extended, amount),
+    reached: amount,
+    sentence: `${name}: ${said}, but ${dollars(amount)} is billed.`,
+    steps: [
+      { label: 'As printed', value: said },
+      { label: 'Billed', value: dollars(amount) },
+    ],
+  };
+}
