@@ -66,7 +66,7 @@ export async function makeBackup(
 ): Promise<string> {
   if (!store.engine) throw new Error('Only the embedded database is backed up here');
   const to = options.to ?? path.join(backupsFolder(options.dataDir), nameFor(options.now));
-  if (fs.existsSync(to)) throw new Error(`${to} exists already`);
+  if (fs.existsSync(/* turbopackIgnore: true */ to)) throw new Error(`${to} exists already`);
   const draft = `${to}.${process.pid}.part`;
   fs.rmSync(draft, { recursive: true, force: true });
   fs.mkdirSync(draft, { recursive: true });

@@ -88,7 +88,6 @@ function openPostgres(url: string): Store {
     connectionString: url,
     max: 10,
     connectionTimeoutMillis: 10_000,
-    idle_in_transaction_session_timeout: 60_000,
   });
   // A connection that breaks while nobody uses it would otherwise end the process.
   pool.on('error', (error) => log.warn({ err: error }, 'an idle database connection broke'));

@@ -32,7 +32,7 @@ function wholeNumber(text: string | undefined, fallback: number): number {
 export function readEnv(source: NodeJS.ProcessEnv = process.env): Env {
   const port = source.PORT ?? '3000';
   return {
-    dataDir: path.resolve(source.DATA_DIR ?? '.data'),
+    dataDir: path.resolve(/* turbopackIgnore: true */ source.DATA_DIR ?? '.data'),
     databaseUrl: source.DATABASE_URL || null,
     appOrigin: source.APP_ORIGIN ?? `http://localhost:${port}`,
     resendApiKey: source.RESEND_API_KEY || null,
