@@ -42,6 +42,9 @@ function inOrder(pumpTicket: Record<PumpClockField, number | null>, ctx: z.Refin
   }
 }
 
+/** A pump ticket's values by themselves, as a form makes them. */
+export const pumpTicketValuesInput = z.strictObject(pumpTicketValues).superRefine(inOrder);
+
 export const createPumpTicketInput = z
   .strictObject({
     /** Made on the device before the first send, so that a repeat is recognised. */

@@ -84,6 +84,10 @@ function agreeing(ticket: Checkable, ctx: z.RefinementCtx): void {
   }
 }
 
+/** A ticket's values by themselves, as a form makes them. */
+export const ticketValuesInput = z.strictObject(ticketValues).superRefine(agreeing);
+export type TicketValuesInput = z.output<typeof ticketValuesInput>;
+
 const addressed = {
   ticketId: uuid,
   /** The version that the person saw: a change made meanwhile is not overwritten. */
