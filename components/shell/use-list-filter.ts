@@ -25,6 +25,13 @@ export function useListFilter() {
       if (name !== 'offset') next.delete('offset');
       go(next);
     },
+    /** Several at once, so that the address goes through no state between them. */
+    setAll(values: Readonly<Record<string, string>>) {
+      const next = new URLSearchParams(params);
+      for (const [name, value] of Object.entries(values)) next.set(name, value);
+      next.delete('offset');
+      go(next);
+    },
     clear: () => go(new URLSearchParams()),
   };
 }
