@@ -1,5 +1,5 @@
-import type { Money } from '../money/money';
-import { dollars } from '../words';
+import type { Money, Quantity } from '../money/money';
+import { dollars, price } from '../words';
 import { type DraftFinding, withinSlack } from './draft';
 
 /**
@@ -35,6 +35,23 @@ export function findingsOf(
     from = to;
     return finding;
   });
+}
+
+/**
+ * How a step came to its dollars: "0.50 yd × $158.00 = $79.00" where that is exact, else, as
+ * amounts were rounded before, the amounts themselves.
+ */
+export function stepWords(
+  apart: { readonly quantity: Quantity; readonly words: string },
+  rate: Money,
+  from: Money,
+  to: Money,
+): string {
+  const difference = to.minus(from);
+  const product = apart.quantity.times(rate).toDecimalPlaces(2);
+  return product.eq(difference)
+    ? `${apart.words} × ${price(rate)} = ${dollars(difference)}`
+    : `${dollars(to)} − ${dollars(from)} = ${dollars(difference)}`;
 }
 
 /** The cause that remains when quantity × price is not the printed amount. */

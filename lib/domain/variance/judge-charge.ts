@@ -1,8 +1,8 @@
-import { extend, money, roundCents, sumMoney, sumQuantity } from '../money/money';
+import { extend, money, quantity, roundCents, sumMoney, sumQuantity } from '../money/money';
 import type { ExpectedLine } from '../rating/expected-line';
 import { dollars, price, yards } from '../words';
 import { billedFigures } from './billed-figures';
-import { arithmeticCause, type Cause, findingsOf } from './chain';
+import { arithmeticCause, type Cause, findingsOf, stepWords } from './chain';
 import { type DraftFinding, type Judgement, nothingOwed, withinSlack } from './draft';
 import { explain } from './explain';
 import { judgeNotProvable } from './judge-time';
@@ -59,30 +59,32 @@ export function judgePumpYards(at: LineCase, expected: readonly ExpectedLine[]):
   const unitPrice = figures.unitPrice ?? rate;
   const atAgreed = roundCents(extend(billed, rate));
   const atBilled = roundCents(extend(billed, unitPrice));
-  const apart = yards(billed.minus(charged));
+  const apart = quantity(billed.minus(charged));
+  const yardsStep = stepWords({ quantity: apart, words: yards(apart) }, rate, due, atAgreed);
+  const rateApart = money(unitPrice.minus(rate));
+  const all = { quantity: billed, words: yards(billed) };
+  const priceStep = stepWords(all, rateApart, atAgreed, atBilled);
   const causes: Cause[] = [
     {
       kind: 'pumpYardsDiffer',
       present: !withinSlack(atAgreed, due),
       reached: atAgreed,
-      sentence: `${why.sentence} Billed are ${yards(billed)}, ${yards(charged)} are owed; ${apart} × ${price(rate)} = ${dollars(atAgreed.minus(due))}.`,
+      sentence: `${why.sentence} Billed are ${yards(billed)}, ${yards(charged)} are owed; ${yardsStep}.`,
       steps: [
         ...why.steps,
         { label: 'Billed', value: yards(billed) },
-        {
-          label: 'Difference',
-          value: `${apart} × ${price(rate)} = ${dollars(atAgreed.minus(due))}`,
-        },
+        { label: 'Difference', value: yardsStep },
       ],
     },
     {
       kind: 'priceDiffers',
       present: !withinSlack(atBilled, atAgreed),
       reached: atBilled,
-      sentence: `${at.name}: yards pumped are billed at ${price(unitPrice)}, ${price(rate)} is agreed; ${yards(billed)} × ${price(unitPrice.minus(rate))} = ${dollars(atBilled.minus(atAgreed))}.`,
+      sentence: `${at.name}: yards pumped are billed at ${price(unitPrice)}, ${price(rate)} is agreed; ${priceStep}.`,
       steps: [
         { label: 'Agreed', value: `${price(rate)} per yd` },
         { label: 'Billed', value: `${price(unitPrice)} per yd` },
+        { label: 'Difference', value: priceStep },
       ],
     },
     arithmeticCause(at.name, figures.extended, at.line.amount, figures.arithmetic),

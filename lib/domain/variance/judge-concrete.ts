@@ -9,9 +9,9 @@ import {
 } from '../money/money';
 import type { ExpectedLine } from '../rating/expected-line';
 import { sameMix } from '../rating/mix-code';
-import { day, dollars, price, yards } from '../words';
+import { day, price, yards } from '../words';
 import { billedFigures } from './billed-figures';
-import { arithmeticCause, type Cause, findingsOf } from './chain';
+import { arithmeticCause, type Cause, findingsOf, stepWords } from './chain';
 import { type Judgement, notCheckable, withinSlack } from './draft';
 import { explain } from './explain';
 import type { LineCase } from './line-case';
@@ -49,16 +49,16 @@ function agreedFor(at: LineCase, owed: readonly Owed[]): Agreed | null {
 }
 
 function yardsCause(at: LineCase, agreed: Agreed, billed: Quantity | null): Cause {
-  const apart = billed?.minus(agreed.delivered) ?? null;
+  const apart = billed && quantity(billed.minus(agreed.delivered));
   const reached = billed === null ? agreed.amount : roundCents(extend(billed, agreed.rate));
-  const dollarsApart = dollars(reached.minus(agreed.amount).abs());
-  const arithmetic = `${yards((apart ?? agreed.delivered).abs())} × ${price(agreed.rate)} = ${dollarsApart}`;
+  const missed = { quantity: apart ?? agreed.delivered, words: yards(apart ?? agreed.delivered) };
+  const arithmetic = stepWords(missed, agreed.rate, agreed.amount, reached);
   const said = at.tickets.length > 1 ? 'the tickets come to' : 'the ticket says';
   return {
     kind: 'yardsDiffer',
     present: apart?.abs().gte('0.005') ?? false,
     reached,
-    sentence: `${at.name}: billed ${yards(billed ?? agreed.delivered)}, ${said} ${yards(agreed.delivered)}; ${arithmetic}${apart?.isNegative() ? ' too little' : ''}.`,
+    sentence: `${at.name}: billed ${yards(billed ?? agreed.delivered)}, ${said} ${yards(agreed.delivered)}; ${arithmetic}.`,
     steps: [
       { label: 'Delivered', value: yards(agreed.delivered) },
       { label: 'Billed', value: yards(billed ?? agreed.delivered) },
@@ -87,8 +87,10 @@ function priceCauses(
   const otherPrice = mix === null ? null : (at.sheet?.priceOf(mix) ?? null);
   const mixRate = otherPrice ? money(otherPrice.clause.dollarsPerYd3) : unitPrice;
   const amountAt = (rate: Money) => roundCents(extend(billed, rate));
-  const step = (from: Money, to: Money) =>
-    `${yards(billed)} × ${price(money(to.minus(from)))} = ${dollars(amountAt(to).minus(amountAt(from)))}`;
+  const step = (from: Money, to: Money) => {
+    const all = { quantity: billed, words: yards(billed) };
+    return stepWords(all, money(to.minus(from)), amountAt(from), amountAt(to));
+  };
   const base = mix === null ? agreed.rate : mixRate;
   const sheet = at.sheet?.sheet;
   const from = sheet ? ` (${sheet.name}, from ${day(sheet.effectiveFrom)})` : '';

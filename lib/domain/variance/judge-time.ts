@@ -11,7 +11,7 @@ import {
 import type { ExpectedLine } from '../rating/expected-line';
 import { dollars, figure, price } from '../words';
 import { type BilledFigures, billedTime } from './billed-figures';
-import { arithmeticCause, type Cause, findingsOf } from './chain';
+import { arithmeticCause, type Cause, findingsOf, stepWords } from './chain';
 import { type DraftFinding, type Judgement, nothingOwed, withinSlack } from './draft';
 import { explain } from './explain';
 import type { LineCase, Reckoning } from './line-case';
@@ -37,7 +37,8 @@ function timeCause(
   const reached = billed === null ? expected : roundCents(extend(billed, rate));
   const { unit, what } = words;
   const apart = billed === null ? charged : quantity(billed.minus(charged));
-  const arithmetic = `${figure(apart)} ${unit} × ${price(rate)} = ${dollars(money(reached.minus(expected)))}`;
+  const missed = { quantity: apart, words: `${figure(apart)} ${unit}` };
+  const arithmetic = stepWords(missed, rate, expected, reached);
   const why = explain(owed);
   return {
     kind: words.timeKind,
@@ -62,7 +63,8 @@ function rateCause(
   const unitPrice = figures.unitPrice ?? rate;
   const reached = roundCents(extend(billed, unitPrice));
   const before = roundCents(extend(billed, rate));
-  const arithmetic = `${figure(billed)} ${words.unit} × ${price(money(unitPrice.minus(rate)))} = ${dollars(money(reached.minus(before)))}`;
+  const charged = { quantity: billed, words: `${figure(billed)} ${words.unit}` };
+  const arithmetic = stepWords(charged, money(unitPrice.minus(rate)), before, reached);
   return {
     kind: words.priceKind,
     present: !withinSlack(reached, before),
