@@ -3,6 +3,7 @@ import {
   type Money,
   money,
   type Quantity,
+  quantity,
   roundCents,
   sumMoney,
   sumQuantity,
