@@ -1,6 +1,7 @@
 // `npm run app`: from a fresh clone to a running product. Plain Node without packages: it runs
 // before anything is installed.
 import { connect } from 'node:net';
+import { createInterface } from 'node:readline';
 import {
   ensureBuild,
   ensureDependencies,
@@ -61,7 +62,16 @@ if (await isTaken()) {
 }
 
 let code = null;
-const server = startServer({ port, host, stdio: ['ignore', 'ignore', 'inherit'] });
+const server = startServer({
+  port,
+  host,
+  env: { LOG_LEVEL: process.env.LOG_LEVEL ?? 'warn' },
+  stdio: ['ignore', 'pipe', 'inherit'],
+});
+// The product's log is JSON lines; the framework's banner would only hide the welcome.
+createInterface({ input: server.stdout }).on('line', (line) => {
+  if (line.startsWith('{')) console.log(line);
+});
 server.once('exit', (status, signal) => {
   code = status ?? (signal ? 1 : 0);
   // What went wrong was said by the server itself.
