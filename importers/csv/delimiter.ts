@@ -11,6 +11,7 @@ export interface DelimiterGuess {
 }
 
 const SAMPLE_LINES = 60;
+const SAMPLE_CHARACTERS = 4_000;
 const NAMES: Readonly<Record<Delimiter, string>> = {
   ',': 'comma',
   ';': 'semicolon',
@@ -55,6 +56,7 @@ export function detectDelimiter(text: string): DelimiterGuess {
     .split('\n', SAMPLE_LINES * 2)
     .filter((line) => line.trim() !== '')
     .slice(0, SAMPLE_LINES)
+    .map((line) => line.slice(0, SAMPLE_CHARACTERS))
     .join('\n');
   const ranked = DELIMITERS.map((delimiter) => ({ delimiter, fit: score(sample, delimiter) })).sort(
     (left, right) => right.fit - left.fit,

@@ -21,6 +21,7 @@ export interface BillCsvInput {
 
 const SAMPLE_ROWS = 12;
 const SAMPLES_PER_COLUMN = 3;
+const PREAMBLE_CHARACTERS = 200;
 
 const NO_FACTS: DocumentFacts = {
   supplierName: null,
@@ -174,7 +175,9 @@ export function readBillCsv(input: BillCsvInput): BillCsvPreview {
   const rows = readBody(settled, collector);
   const items = planItems(rows, input.existingRowKeys, collector);
   const { dateOrder, decimalMark } = settled.layout;
-  const preamble = settled.preamble.map((record) => record.cells);
+  const preamble = settled.preamble.map((record) =>
+    record.cells.map((cell) => cell.slice(0, PREAMBLE_CHARACTERS)),
+  );
   const document = withBalances(readPreamble(preamble, dateOrder, decimalMark), items);
   observeOutcome(items, collector);
   checkTotals(items, document, sumItems(items).net, collector);

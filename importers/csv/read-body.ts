@@ -1,7 +1,8 @@
 import type { DiagnosticCollector } from '../core/diagnostic';
 import { headerSignature } from '../map/header-row';
 import type { PlannedRow } from '../map/plan-items';
-import { columnTitle, type RowReader, readRow } from '../map/read-row';
+import { readRow } from '../map/read-row';
+import { columnTitle, type RowReader } from '../map/row-cells';
 import { MAX_CELL_CHARACTERS } from './limits';
 import { isBlank, type SourceRecord } from './records';
 import type { SettledLayout } from './settle-layout';

@@ -19,7 +19,7 @@ import {
 } from '../map/header-row';
 import { detectDateOrder } from '../map/read-date';
 import { detectDecimalMark, looksNumeric } from '../map/read-number';
-import { columnTitle } from '../map/read-row';
+import { columnTitle } from '../map/row-cells';
 import type { SourceRecord } from './records';
 
 /** How the file is read, and where its parts begin. */
@@ -126,7 +126,8 @@ function settleDates(
 ): DateOrder {
   if (column === null) return 'MDY';
   const cells = body.map((record) => record.cells[column] ?? '').filter((cell) => cell !== '');
-  const guess = detectDateOrder(cells, preambleDates(preamble.map((record) => record.cells)));
+  const witnesses = preamble.map((record) => record.cells.map((cell) => cell.slice(0, 200)));
+  const guess = detectDateOrder(cells, preambleDates(witnesses));
   if (!guess.ambiguous && !guess.mixed) return guess.order;
   const words = { MDY: 'month first', DMY: 'day first', YMD: 'year first' }[guess.order];
   collector.add({

@@ -84,6 +84,9 @@ const RULES: readonly Rule[] = [
 const ADDITION =
   /\b(fib(er|re)s?|accelerat\w*|calcium|retard\w*|water reduc\w*|plasticiz\w*|superplast\w*|mid-?range|color|colour|air entrain(er|ing)|admix\w*)\b/i;
 
+/** Characters that tell what is charged; a text that goes on costs no further time. */
+const LOOKED_AT = 200;
+
 function quoted(found: RegExpExecArray): string {
   return `says “${found[0].trim().toLowerCase()}”`;
 }
@@ -127,7 +130,8 @@ function fromRule(rule: Rule, found: RegExpExecArray, clues: ChargeClues): Charg
 
 /** Tells what a line charges for, from its words, its item code and its unit. */
 export function readChargeKind(clues: ChargeClues): ChargeReading {
-  const words = `${clues.description} ${clues.itemCode ?? ''}`.trim();
+  const description = clues.description.slice(0, LOOKED_AT);
+  const words = `${description} ${(clues.itemCode ?? '').slice(0, LOOKED_AT)}`.trim();
   const addition = ADDITION.exec(words);
   const strongMix = /\bpsi\b|\bmpa\b|\bmix\b/i.test(words);
   if (addition && !strongMix && !/\btax\b/i.test(words)) {

@@ -29,11 +29,16 @@ function namesCharge(cell: string): boolean {
   return readChargeKind({ ...clues, ticketNumber: null, ticketYards: null }).sure;
 }
 
+/** Characters of a cell that tell what it is. */
+const LOOKED_AT = 200;
+
 export function describeColumn(
   rows: readonly (readonly string[])[],
   column: number,
 ): ColumnContent {
-  const cells = rows.map((row) => (row[column] ?? '').trim()).filter((cell) => cell !== '');
+  const cells = rows
+    .map((row) => (row[column] ?? '').slice(0, LOOKED_AT).trim())
+    .filter((cell) => cell !== '');
   return {
     filled: cells.length,
     dates: share(cells, looksLikeDate),

@@ -192,7 +192,8 @@ class Planner {
   }
 
   private observeUnknown(row: PlannedRow, values: BillLineValues, reason: string): void {
-    const named = values.description === '' ? 'without a description' : `“${values.description}”`;
+    const named =
+      values.description === '' ? 'without a description' : `“${values.description.slice(0, 60)}”`;
     this.collector.add({
       code: 'row.chargeUnknown',
       severity: 'guess',

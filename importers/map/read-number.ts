@@ -8,6 +8,8 @@ import type { DecimalMark } from '../core/layout';
 const BLANKS = new Set(['', '-', '–', '—', 'n/a', 'na', 'nil', 'none']);
 const MAX_WHOLE_DIGITS = 12;
 const MAX_DECIMALS = 6;
+/** Longer cells are text; not looking at them also keeps hostile ones from costing time. */
+const MAX_CHARACTERS = 60;
 
 export type NumberReading =
   | { readonly kind: 'number'; readonly text: string; readonly unit: string | null }
@@ -24,18 +26,18 @@ function unreadable(why: string): NumberReading {
   return { kind: 'unreadable', why };
 }
 
+function withoutCurrency(text: string): string {
+  return text.replace(/^\s*(usd|eur|gbp|cad)\b|\b(usd|eur|gbp|cad)\s*$|[$€£]/gi, '').trim();
+}
+
 /** Takes off currency, sign in any of its places, and a unit after the number. */
 function strip(cell: string): Bare {
-  let text = cell
-    .replace(/[\u00a0\u202f\u2009]/g, ' ')
-    .replace(/\u2212/g, '-')
-    .trim();
+  let text = withoutCurrency(cell.replace(/[\u00a0\u202f\u2009]/g, ' ').replace(/\u2212/g, '-'));
   let negative = false;
   if (/^\(.*\)$/.test(text)) {
     negative = true;
     text = text.slice(1, -1).trim();
   }
-  text = text.replace(/^(usd|eur|gbp|cad)\b|\b(usd|eur|gbp|cad)$|[$€£]/gi, '').trim();
   const credit = /\s*\b(cr|dr)\.?$/i.exec(text) ?? /(?<=\d)\s*(cr|dr)\.?$/i.exec(text);
   if (credit) {
     negative ||= credit[1]?.toLowerCase() === 'cr';
@@ -49,12 +51,13 @@ function strip(cell: string): Bare {
   } else {
     text = text.replace(/^\+\s*/, '');
   }
-  return { digits: text.replace(/[$€£]/g, '').trim(), negative, unit: unit?.[1] ?? null };
+  return { digits: text.trim(), negative, unit: unit?.[1] ?? null };
 }
 
 /** Reads one cell. A unit after the number ("10.00 CY") is given back beside it. */
 export function readNumber(cell: string, mark: DecimalMark): NumberReading {
   if (BLANKS.has(cell.trim().toLowerCase())) return { kind: 'blank' };
+  if (cell.length > MAX_CHARACTERS) return unreadable('too long');
   const { digits, negative, unit } = strip(cell);
   if (BLANKS.has(digits)) return { kind: 'blank' };
   if (/^\d(\.\d+)?e\+?\d+$/i.test(cell.trim())) return unreadable('a shortened number');
