@@ -9,7 +9,7 @@ import { copyDurably, syncFolder, writeDurably } from './durable-files';
  * manifest that says what belongs to it. It is complete or not there: it is built under another
  * name, flushed to the disk, and renamed.
  */
-export interface Manifest {
+interface Manifest {
   readonly format: 1;
   readonly madeAt: string;
   readonly database: { readonly file: string; readonly sha256: string };

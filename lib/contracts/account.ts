@@ -3,7 +3,7 @@ import { givenPassword, newPassword } from './auth';
 import { name, uuid } from './common';
 import { role } from './people';
 
-export const locale = z.enum(['en', 'es']);
+const locale = z.enum(['en', 'es']);
 
 export const account = z.object({
   personId: uuid,

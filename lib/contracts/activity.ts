@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { pageInput, pageOf, plainDate, uuid } from './common';
 
-export const activityRow = z.object({
+const activityRow = z.object({
   id: uuid,
   at: z.iso.datetime(),
   actorId: uuid.nullable(),

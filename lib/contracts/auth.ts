@@ -10,7 +10,7 @@ export const newPassword = z
 export const givenPassword = z.string().min(1, 'needed').max(256, 'at most 256 characters');
 
 /** The token of a link in a message. */
-export const linkToken = z.string().regex(/^[A-Za-z0-9_-]{20,100}$/, 'not a complete link');
+const linkToken = z.string().regex(/^[A-Za-z0-9_-]{20,100}$/, 'not a complete link');
 
 export const timeZone = z
   .string()

@@ -16,7 +16,7 @@ export const tolerance = z.strictObject({
     .trim()
     .regex(/^(100(\.0{1,2})?|\d{1,2}(\.\d{1,2})?)$/, 'a percentage from 0 to 100'),
 });
-export const tolerances = z.partialRecord(z.enum(VARIANCE_KINDS), tolerance);
+const tolerances = z.partialRecord(z.enum(VARIANCE_KINDS), tolerance);
 
 const settings = {
   name,

@@ -1,11 +1,11 @@
 import { z } from 'zod';
 import { pageInput, pageOf, uuid } from './common';
 
-export const MAIL_KINDS = ['invitation', 'passwordReset', 'order'] as const;
+const MAIL_KINDS = ['invitation', 'passwordReset', 'order'] as const;
 /** kept: no mail service is set up, so the message stays here for the owner to pass on. */
 export const MAIL_STATES = ['waiting', 'sent', 'kept', 'failed'] as const;
 
-export const mailRow = z.object({
+const mailRow = z.object({
   id: uuid,
   kind: z.enum(MAIL_KINDS),
   to: z.string(),

@@ -80,7 +80,7 @@ export async function jsonBody(
 }
 
 /** The whole body, or null as soon as it is longer than `limit`, whatever the headers claim. */
-export async function readBounded(request: NextRequest, limit: number): Promise<Uint8Array | null> {
+async function readBounded(request: NextRequest, limit: number): Promise<Uint8Array | null> {
   if (Number(request.headers.get('content-length') ?? 0) > limit) return null;
   if (!request.body) return new Uint8Array();
   const chunks: Uint8Array[] = [];
