@@ -8,17 +8,20 @@ export interface OrderIndex {
   isBalanceLoad(ticket: TicketFacts): boolean | null;
 }
 
-/** The order in which loads came: by load number, then by the clock, then by ticket number. */
-function cameBefore(one: TicketFacts, other: TicketFacts): number {
-  const byDate = one.date < other.date ? -1 : one.date > other.date ? 1 : 0;
-  const clock = (ticket: TicketFacts) =>
-    ticket.batchedAt ?? ticket.arrivedAt ?? ticket.startedAt ?? ticket.finishedAt;
-  const byLoad =
-    one.loadNumber !== null && other.loadNumber !== null ? one.loadNumber - other.loadNumber : 0;
-  const [first, second] = [clock(one), clock(other)];
-  const byClock = first !== null && second !== null ? first - second : 0;
-  const byNumber = one.number < other.number ? -1 : one.number > other.number ? 1 : 0;
-  return byDate || byLoad || byClock || byNumber || (one.id < other.id ? -1 : 1);
+/**
+ * The order in which loads came: by load number, then by the clock, then by ticket number. What is
+ * not known sorts first, so that the order is one and the same however the tickets are given.
+ */
+function cameBefore(one: TicketFacts, other: TicketFacts): boolean {
+  const [first, second] = [arrivalKey(one), arrivalKey(other)];
+  const at = first.findIndex((part, index) => part !== second[index]);
+  return at >= 0 && (first[at] ?? '') < (second[at] ?? '');
+}
+
+function arrivalKey(ticket: TicketFacts): readonly string[] {
+  const clock = ticket.batchedAt ?? ticket.arrivedAt ?? ticket.startedAt ?? ticket.finishedAt;
+  const padded = (value: number | null) => (value === null ? '' : String(value).padStart(6, '0'));
+  return [ticket.date, padded(ticket.loadNumber), padded(clock), ticket.number, ticket.id];
 }
 
 export function indexOrders(
@@ -34,7 +37,7 @@ export function indexOrders(
   for (const ticket of tickets) {
     if (ticket.orderId === null) continue;
     const seen = loads.get(ticket.orderId);
-    const last = seen && cameBefore(ticket, seen.last) < 0 ? seen.last : ticket;
+    const last = seen && cameBefore(ticket, seen.last) ? seen.last : ticket;
     loads.set(ticket.orderId, { last, count: (seen?.count ?? 0) + 1 });
   }
   return {

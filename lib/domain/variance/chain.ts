@@ -18,16 +18,24 @@ export interface Cause {
 
 /**
  * The findings of a line by its causes. A line within two cents of what it should be agrees,
- * whatever its parts; cents that no cause explains go with the last one that is present.
+ * whatever its parts; cents that no cause explains go with the last one that is present. Where a
+ * line prints too little to tell the cause, the whole difference is `unexplained`'s kind.
  */
 export function findingsOf(
   expected: Money,
   causes: readonly Cause[],
   amount: Money,
   clauseId: string | null,
+  unexplained: { readonly kind: DraftFinding['kind']; readonly name: string },
 ): DraftFinding[] {
   if (withinSlack(expected, amount)) return [];
   const present = causes.filter((cause) => cause.present);
+  if (present.length === 0) {
+    const apart = `${dollars(amount)} − ${dollars(expected)} = ${dollars(amount.minus(expected))}`;
+    const sentence = `${unexplained.name}: ${dollars(expected)} is owed, ${dollars(amount)} is billed; ${apart}.`;
+    const steps = [{ label: 'Difference', value: apart }];
+    return [{ kind: unexplained.kind, expected, billed: amount, clauseId, sentence, steps }];
+  }
   let from = expected;
   return present.map(({ kind, reached, sentence, steps }, at) => {
     const to = at === present.length - 1 ? amount : reached;
@@ -48,7 +56,9 @@ export function stepWords(
   to: Money,
 ): string {
   const difference = to.minus(from);
-  const product = apart.quantity.times(rate).toDecimalPlaces(2);
+  // The words show yards to two places, all else and prices to four: what is shown must work out.
+  const shown = apart.quantity.toDecimalPlaces(apart.words.endsWith('yd') ? 2 : 4);
+  const product = shown.times(rate.toDecimalPlaces(4)).toDecimalPlaces(2);
   return product.eq(difference)
     ? `${apart.words} × ${price(rate)} = ${dollars(difference)}`
     : `${dollars(to)} − ${dollars(from)} = ${dollars(difference)}`;

@@ -43,7 +43,11 @@ export function judgeCharge(
     },
     arithmeticCause(at.name, figures.extended, amount, figures.arithmetic),
   ];
-  return { expectedAmount: due, findings: findingsOf(due, causes, amount, clauseId), ...why };
+  return {
+    expectedAmount: due,
+    findings: findingsOf(due, causes, amount, clauseId, { kind: kinds.wrong, name: at.name }),
+    ...why,
+  };
 }
 
 /** Yards pumped: first the yards, then the price, then the arithmetic. */
@@ -91,7 +95,10 @@ export function judgePumpYards(at: LineCase, expected: readonly ExpectedLine[]):
   ];
   return {
     expectedAmount: due,
-    findings: findingsOf(due, causes, at.line.amount, clauseId),
+    findings: findingsOf(due, causes, at.line.amount, clauseId, {
+      kind: 'priceDiffers',
+      name: at.name,
+    }),
     ...why,
   };
 }

@@ -151,7 +151,10 @@ export function judgeConcrete(at: LineCase, expected: readonly ExpectedLine[]): 
     causes.push(...priceCauses(at, agreed, billed, figures.unitPrice));
   }
   causes.push(arithmeticCause(at.name, figures.extended, at.line.amount, figures.arithmetic));
-  const found = findingsOf(agreed.amount, causes, at.line.amount, agreed.clauseId);
+  const found = findingsOf(agreed.amount, causes, at.line.amount, agreed.clauseId, {
+    kind: 'priceDiffers',
+    name: at.name,
+  });
   const unpriced = owed.length === 0;
   const { sentence, steps } = unpriced
     ? { sentence: `${at.name}: the rate sheet has no price for this mix.`, steps: [] }

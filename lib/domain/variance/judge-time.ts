@@ -103,7 +103,10 @@ function judgeTime(at: LineCase, owed: readonly Owed[], words: TimeWords): Judge
           rateCause(at, rate, words, figures.quantity ?? charged, figures),
           arithmeticCause(at.name, figures.extended, at.line.amount, figures.arithmetic),
         ];
-  const findings = findingsOf(expected, causes, at.line.amount, owed[0]?.clauseId ?? null);
+  const findings = findingsOf(expected, causes, at.line.amount, owed[0]?.clauseId ?? null, {
+    kind: words.priceKind,
+    name: at.name,
+  });
   return { expectedAmount: expected, findings, ...explain(owed) };
 }
 

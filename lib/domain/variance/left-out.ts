@@ -36,7 +36,10 @@ export function leftOut(
       billed: ZERO_MONEY,
       clauseId: null,
       sentence: `${what}: delivered, but on no bill of the period; ${worth}.`,
-      steps: due.map((line) => ({ label: line.label, value: line.explanation.sentence })),
+      steps: due.map(({ label, explanation }) => ({
+        label,
+        value: explanation.steps.at(-1)?.value ?? explanation.sentence,
+      })),
     },
   };
 }
