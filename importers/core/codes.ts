@@ -2,7 +2,7 @@
  * Every diagnostic that an importer can give, with one line of documentation each. Codes are
  * stable: people's filters, tests and support answers refer to them.
  */
-export const DIAGNOSTIC_CODES = {
+const DIAGNOSTIC_CODES = {
   'file.empty': 'The file has no bytes, or nothing but blank lines.',
   'file.tooLarge': 'The file is larger than the importer reads.',
   'file.notText': 'The content is not delimited text: a PDF, workbook, picture, archive or page.',

@@ -4,7 +4,7 @@ import { DIAGNOSTIC_CODE_LIST, type DiagnosticCode } from './codes';
 export const SEVERITIES = ['error', 'warning', 'guess'] as const;
 export type Severity = (typeof SEVERITIES)[number];
 
-export const placeSchema = z.object({
+const placeSchema = z.object({
   file: z.string(),
   /** Physical line of the file, from 1; null where the whole file is meant. */
   line: z.number().int().min(1).nullable(),
@@ -12,7 +12,6 @@ export const placeSchema = z.object({
   column: z.string().nullable(),
   columnIndex: z.number().int().min(0).nullable(),
 });
-export type Place = z.infer<typeof placeSchema>;
 
 /** One thing that a person should know about a file, precise enough to go and look at it. */
 export const diagnosticSchema = z.object({
@@ -47,7 +46,7 @@ export interface Observation {
 }
 
 /** Diagnostics are shown to a person: beyond this many of one severity, the number will do. */
-export const SHOWN_PER_SEVERITY = 100;
+const SHOWN_PER_SEVERITY = 100;
 const RAW_SHOWN = 200;
 
 export interface DiagnosticList {

@@ -37,10 +37,10 @@ export const TARGET_FIELD_LABELS: Readonly<Record<TargetField, string>> = {
   balance: 'Running balance (not used)',
 };
 
-export const ENCODINGS = ['utf-8', 'windows-1252', 'utf-16le', 'utf-16be'] as const;
+const ENCODINGS = ['utf-8', 'windows-1252', 'utf-16le', 'utf-16be'] as const;
 export const DELIMITERS = [',', ';', '\t', '|'] as const;
-export const DATE_ORDERS = ['MDY', 'DMY', 'YMD'] as const;
-export const DECIMAL_MARKS = ['.', ','] as const;
+const DATE_ORDERS = ['MDY', 'DMY', 'YMD'] as const;
+const DECIMAL_MARKS = ['.', ','] as const;
 
 export type Encoding = (typeof ENCODINGS)[number];
 export type Delimiter = (typeof DELIMITERS)[number];
@@ -50,7 +50,7 @@ export type DecimalMark = (typeof DECIMAL_MARKS)[number];
 const columnIndex = z.number().int().min(0).max(59).nullable().default(null);
 
 /** Which column (counted from 0) holds each field; null where the file has none. */
-export const columnMappingSchema = z.strictObject({
+const columnMappingSchema = z.strictObject({
   date: columnIndex,
   ticketNumber: columnIndex,
   invoiceNumber: columnIndex,

@@ -8,7 +8,7 @@ import { importLayoutSchema, TARGET_FIELDS } from './layout';
  * that it can be shown, stored as evidence, sent as JSON and replayed. It never writes.
  */
 
-export const ROW_KINDS = [
+const ROW_KINDS = [
   'line',
   'tax',
   'credit',
@@ -20,13 +20,13 @@ export const ROW_KINDS = [
 ] as const;
 export type RowKind = (typeof ROW_KINDS)[number];
 
-export const ITEM_ACTIONS = ['create', 'skip', 'error'] as const;
-export const SKIP_REASONS = ['alreadyImported', 'opening', 'closing', 'subtotal', 'note'] as const;
+const ITEM_ACTIONS = ['create', 'skip', 'error'] as const;
+const SKIP_REASONS = ['alreadyImported', 'opening', 'closing', 'subtotal', 'note'] as const;
 
 /** Decimal text with a point and no grouping: "-1234.50". */
 const decimalText = z.string();
 
-export const billLineValuesSchema = z.object({
+const billLineValuesSchema = z.object({
   /** YYYY-MM-DD. */
   date: z.string().nullable(),
   ticketNumber: z.string().nullable(),
@@ -45,7 +45,7 @@ export const billLineValuesSchema = z.object({
 });
 export type BillLineValues = z.infer<typeof billLineValuesSchema>;
 
-export const importItemSchema = z.object({
+const importItemSchema = z.object({
   /**
    * Fingerprint of the line's own content with its occurrence in the file ("…#1"): the same
    * line has the same key in any file, in any order of columns and style of dates.
@@ -67,7 +67,7 @@ export type ImportItem = z.infer<typeof importItemSchema>;
 
 export const COLUMN_CONFIDENCES = ['confirmed', 'certain', 'likely', 'unsure'] as const;
 
-export const previewColumnSchema = z.object({
+const previewColumnSchema = z.object({
   index: z.number().int(),
   title: z.string(),
   field: z.enum(TARGET_FIELDS).nullable(),
@@ -75,10 +75,9 @@ export const previewColumnSchema = z.object({
   why: z.string().nullable(),
   samples: z.array(z.string()),
 });
-export type PreviewColumn = z.infer<typeof previewColumnSchema>;
 
 /** What the document says about itself, above, between or below its lines. */
-export const documentFactsSchema = z.object({
+const documentFactsSchema = z.object({
   supplierName: z.string().nullable(),
   documentNumber: z.string().nullable(),
   documentDate: z.string().nullable(),
@@ -89,7 +88,7 @@ export const documentFactsSchema = z.object({
 });
 export type DocumentFacts = z.infer<typeof documentFactsSchema>;
 
-export const importTotalsSchema = z.object({
+const importTotalsSchema = z.object({
   /** Every record of the file: lines + skipped + failed. */
   records: z.number().int(),
   /** Records that are lines of the bill, already imported or not. */
