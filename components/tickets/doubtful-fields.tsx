@@ -24,15 +24,16 @@ export function DoubtfulFields(props: DoubtfulFieldsProps) {
   const words = pourDayMessages(useLocale());
   if (check.doubtful.length === 0) return null;
   return (
-    <section id="look-at-these" className="border-b border-wet bg-canary px-4 pt-3 pb-4">
+    <section className="border-b border-wet bg-canary px-4 pt-3 pb-4">
       <h2 className="text-lg">{words.check.lookAtThese}</h2>
       <p className="text-[14px]">{words.check.lookSays}</p>
       <ul className="mt-2 grid gap-3">
         {check.doubtful.map((field) => (
           <li
             key={field}
+            id={`look-at-${field}`}
             className={classNames(
-              'grid grid-cols-[1fr_auto] items-end gap-2 border-l-[5px] pl-2.5',
+              'scroll-mt-[46dvh] grid grid-cols-[1fr_auto] items-end gap-2 border-l-[5px] pl-2.5',
               check.open.includes(field) ? 'border-keel' : 'border-moss',
               insists && check.open.includes(field) && look === field && 'bg-canary-soft',
             )}

@@ -15,10 +15,10 @@ export interface PhotoView {
   readonly y: number;
 }
 
-const LARGEST_SCALE = 2;
+const LARGEST_SCALE = 1.1;
 /** Share of the frame that a looked-at spot may fill: enough around it to see where one is. */
-const SPOT_WIDTH = 0.62;
-const SPOT_HEIGHT = 0.34;
+const SPOT_WIDTH = 0.5;
+const SPOT_HEIGHT = 0.25;
 
 /** The whole photo, centred. */
 export function wholeView(photo: Size, frame: Size): PhotoView {

@@ -44,12 +44,12 @@ export function SnapButtons({ snap, choose, onFile, size = 'big', className }: S
         tabIndex={-1}
         aria-label={choose}
       />
-      <Button size={size} onClick={() => camera.current?.click()}>
+      <Button size={size} className="px-2" onClick={() => camera.current?.click()}>
         {snap}
       </Button>
       <Button
         variant="quiet"
-        className="min-h-14 max-w-28 text-[15px]"
+        className="min-h-14 max-w-24 px-2 text-[15px]"
         onClick={() => album.current?.click()}
       >
         {choose}

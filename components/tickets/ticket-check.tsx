@@ -69,8 +69,9 @@ export function TicketCheck(props: TicketCheckProps) {
       check.state.submit(event);
       return;
     }
-    setLook(check.open[0] ?? null);
-    document.getElementById('look-at-these')?.scrollIntoView({ block: 'center' });
+    const [firstOpen] = check.open;
+    setLook(firstOpen ?? null);
+    document.getElementById(`look-at-${firstOpen}`)?.scrollIntoView({ block: 'start' });
   }
   const watched = look ?? check.open[0] ?? null;
   const field = (name: TicketFormField) => (

@@ -1,3 +1,4 @@
+import type { QueryClient } from '@tanstack/react-query';
 import { queryOptions } from '@tanstack/react-query';
 import { reading } from '../contracts/photos';
 import { pourDay, pourDayPlacement } from '../contracts/pour-day';
@@ -60,3 +61,12 @@ export function isBeingRead(state: string | undefined): boolean {
 
 /** Where the browser gets a photo from. */
 export const photoAddress = (photoId: string) => `/api/photos/${photoId}`;
+
+/**
+ * After a change: what is on the screen is asked for again, what is not is forgotten, so that the
+ * next screen starts from what its page brings and not from yards of a moment ago.
+ */
+export async function refreshPourDay(queries: QueryClient): Promise<void> {
+  queries.removeQueries({ queryKey: ['pour-day'], type: 'inactive' });
+  await queries.invalidateQueries({ queryKey: ['pour-day'] });
+}

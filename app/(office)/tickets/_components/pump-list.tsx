@@ -150,6 +150,7 @@ function PumpTable({ rows }: { rows: PumpTicketRow[] }) {
             </Td>
             <Td align="right" copy="delivered">
               <YardsFigure value={row.pumpedYd3} unit={false} />
+              <span className="md:hidden"> yd³</span>
             </Td>
           </tr>
         ))}

@@ -1,5 +1,6 @@
 'use client';
 
+import { useState } from 'react';
 import type { useListFilter } from '@/components/shell/use-list-filter';
 import { Button } from '@/components/ui/button';
 import { SelectField, TextField } from '@/components/ui/field';
@@ -23,6 +24,9 @@ export function TicketFilters(props: TicketFiltersProps) {
     value: filter.get(name),
     onChange: (event: { target: { value: string } }) => filter.set(name, event.target.value),
   });
+  const [open, setOpen] = useState(false);
+  // A phone shows the search first; the other filters unfold.
+  const folded = open ? {} : { fieldClassName: 'max-md:hidden' };
   return (
     <search
       aria-label={words.title}
@@ -34,7 +38,7 @@ export function TicketFilters(props: TicketFiltersProps) {
         onSearch={(text) => filter.set('search', text)}
         fieldClassName="col-span-2 md:col-span-1"
       />
-      <SelectField label={words.status} {...bind('status')}>
+      <SelectField label={words.status} {...folded} {...bind('status')}>
         <option value="">{words.allStatuses}</option>
         {TICKET_STATUSES.map((status) => (
           <option key={status} value={status}>
@@ -42,7 +46,7 @@ export function TicketFilters(props: TicketFiltersProps) {
           </option>
         ))}
       </SelectField>
-      <SelectField label={words.supplier} {...bind('supplierId')}>
+      <SelectField label={words.supplier} {...folded} {...bind('supplierId')}>
         <option value="">{words.allSuppliers}</option>
         {choices.suppliers
           .filter((one) => one.kind === 'readyMix')
@@ -52,7 +56,7 @@ export function TicketFilters(props: TicketFiltersProps) {
             </option>
           ))}
       </SelectField>
-      <SelectField label={words.job} {...bind('jobId')}>
+      <SelectField label={words.job} {...folded} {...bind('jobId')}>
         <option value="">{words.allJobs}</option>
         {choices.jobs.map((one) => (
           <option key={one.id} value={one.id}>
@@ -60,12 +64,20 @@ export function TicketFilters(props: TicketFiltersProps) {
           </option>
         ))}
       </SelectField>
-      <TextField label={words.from} type="date" {...bind('from')} />
-      <TextField label={words.to} type="date" {...bind('to')} />
+      <TextField label={words.from} type="date" {...folded} {...bind('from')} />
+      <TextField label={words.to} type="date" {...folded} {...bind('to')} />
       <div className="col-span-full flex flex-wrap items-center gap-x-4 gap-y-2 text-[14px]">
         <span className="text-ink-soft" role="status">
           {count}
         </span>
+        <Button
+          variant="quiet"
+          className="md:hidden"
+          aria-expanded={open}
+          onClick={() => setOpen(!open)}
+        >
+          {words.filters}
+        </Button>
         {filtered && (
           <Button variant="quiet" onClick={filter.clear}>
             {words.clear}

@@ -13,6 +13,9 @@ import { pourDay } from '@/lib/text/messages/en/pour-day';
 import { tickets as words } from '@/lib/text/messages/en/tickets';
 
 type Filter = ReturnType<typeof useListFilter>;
+/** An empty cell keeps its column in the ledger, and no line on a phone's slip. */
+const NOT_ON_SLIP = 'max-md:hidden!';
+
 type Sort = (typeof TICKET_SORTS)[number];
 
 /** The tickets' ledger; its heads sort, the way in the address. */
@@ -55,6 +58,7 @@ export function TicketTable({ rows, filter }: { rows: TicketRow[]; filter: Filte
 
 function Row({ row }: { row: TicketRow }) {
   const { reading } = row;
+  const truck = row.truck ?? reading?.truck;
   const aside = row.status === 'rejected';
   return (
     <tr className={classNames('hover:bg-band', aside && 'text-ink-soft line-through')}>
@@ -68,19 +72,22 @@ function Row({ row }: { row: TicketRow }) {
         </Link>
         {row.hasPhoto && <span className="text-[12.5px] text-ink-soft"> {words.photo}</span>}
       </Td>
-      <Td>{row.supplierName ?? '–'}</Td>
+      <Td className={row.supplierName ? undefined : NOT_ON_SLIP}>{row.supplierName ?? '–'}</Td>
       <Td>
         {row.jobNumber} {row.jobName}
       </Td>
-      <Td>{row.placementName ?? '–'}</Td>
-      <Td className="font-code text-[13.5px]">{row.mixCode || '–'}</Td>
-      <Td>{row.truck ?? reading?.truck ?? '–'}</Td>
+      <Td className={row.placementName ? undefined : NOT_ON_SLIP}>{row.placementName ?? '–'}</Td>
+      <Td className={classNames('font-code text-[13.5px]', !row.mixCode && NOT_ON_SLIP)}>
+        {row.mixCode || '–'}
+      </Td>
+      <Td className={truck ? undefined : NOT_ON_SLIP}>{truck ?? '–'}</Td>
       <Td align="right" copy="delivered">
         {row.quantityYd3 === null && reading?.quantityYd3 ? (
           <span className="text-ink-soft">{words.read(reading.quantityYd3)}</span>
         ) : (
           <YardsFigure value={row.quantityYd3} unit={false} />
         )}
+        <span className="md:hidden"> yd³</span>
         {row.returnedYd3 !== null && Number(row.returnedYd3) > 0 && (
           <span className="block text-[12.5px]">
             {words.returned(yardsFigure(row.returnedYd3))}
@@ -107,7 +114,9 @@ function Status({ row }: { row: TicketRow }) {
     reading?.state === 'failed'
       ? words.unreadable
       : reading?.state === 'read'
-        ? pourDay.lookAt(reading.doubtful)
+        ? reading.doubtful > 0
+          ? pourDay.lookAt(reading.doubtful)
+          : pourDay.allClear
         : words.unread;
   return (
     <span>
@@ -137,7 +146,7 @@ function SortHead({ sort, filter, align, copy, children }: SortHeadProps) {
     >
       <button
         type="button"
-        className="min-h-6 font-semibold hover:text-ink"
+        className="-my-1 py-1 font-semibold hover:text-ink"
         onClick={() => filter.setAll({ sort, direction: nextWay })}
       >
         {children}

@@ -11,6 +11,7 @@ import type { PourDayPlacement } from '@/lib/contracts/pour-day';
 import type { TicketChoices } from '@/lib/contracts/tickets';
 import { ticketDetail } from '@/lib/contracts/tickets';
 import { apiSend } from '@/lib/queries/api';
+import { refreshPourDay } from '@/lib/queries/tickets';
 import { routes } from '@/lib/routes';
 import { pourDayMessages } from '@/lib/text/messages/pour-day';
 import { readyMixOnly } from './check-screen';
@@ -54,7 +55,7 @@ export function ByHandScreen({ pour, choices }: ByHandScreenProps) {
         withTies={false}
         create={(values) => apiSend('POST', '/api/tickets', { ...values, clientId }, ticketDetail)}
         onDone={async () => {
-          await queries.invalidateQueries({ queryKey: ['pour-day'] });
+          await refreshPourDay(queries);
           router.push(home);
         }}
         onAnotherPhoto={null}

@@ -8,6 +8,7 @@ import { startOfCheck } from '@/components/tickets/ticket-form-schema';
 import { UnsentPhotos } from '@/components/tickets/unsent-photos';
 import { useLocale } from '@/components/ui/locale';
 import type { TicketChoices, TicketDetail } from '@/lib/contracts/tickets';
+import { refreshPourDay } from '@/lib/queries/tickets';
 import { routes } from '@/lib/routes';
 import { pourDayMessages } from '@/lib/text/messages/pour-day';
 import { SiteHead } from './site-head';
@@ -25,7 +26,7 @@ export function CheckScreen({ ticket, choices }: CheckScreenProps) {
   const placementId = ticket.placement?.id;
   const home = placementId ? routes.pourDayPlacement(placementId) : routes.pourDay(ticket.date);
   async function done() {
-    await queries.invalidateQueries({ queryKey: ['pour-day'] });
+    await refreshPourDay(queries);
     router.push(home);
   }
   return (

@@ -10,7 +10,7 @@ import { UnsentPhotos } from '@/components/tickets/unsent-photos';
 import { LinkButton } from '@/components/ui/button';
 import { useLocale } from '@/components/ui/locale';
 import type { PourDayPlacement } from '@/lib/contracts/pour-day';
-import { pourDayPlacementQuery } from '@/lib/queries/tickets';
+import { pourDayPlacementQuery, refreshPourDay } from '@/lib/queries/tickets';
 import { routes } from '@/lib/routes';
 import { weekdayText, yardsFigure } from '@/lib/text/format';
 import { pourDayMessages } from '@/lib/text/messages/pour-day';
@@ -27,7 +27,7 @@ export function PlacementScreen({ first }: { first: PourDayPlacement }) {
   const asked = useQuery({ ...pourDayPlacementQuery(first.id), initialData: first });
   const pour = asked.data;
   async function open(sent: Sent) {
-    await queries.invalidateQueries({ queryKey: ['pour-day'] });
+    await refreshPourDay(queries);
     router.push(routes.pourDayTicket(sent.ticketId));
   }
   async function snap(file: File) {

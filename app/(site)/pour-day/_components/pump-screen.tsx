@@ -7,6 +7,7 @@ import { PumpTicketForm } from '@/components/tickets/pump-ticket-form';
 import { useLocale } from '@/components/ui/locale';
 import type { PumpTicketRow } from '@/lib/contracts/pump-tickets';
 import type { TicketChoices } from '@/lib/contracts/tickets';
+import { refreshPourDay } from '@/lib/queries/tickets';
 import { routes } from '@/lib/routes';
 import { pourDayMessages } from '@/lib/text/messages/pour-day';
 import { SiteHead } from './site-head';
@@ -37,7 +38,7 @@ export function PumpScreen({ ticket, start, choices, placement }: PumpScreenProp
         choices={choices}
         withTies={false}
         onDone={async () => {
-          await queries.invalidateQueries({ queryKey: ['pour-day'] });
+          await refreshPourDay(queries);
           router.push(home);
         }}
       />

@@ -13,6 +13,8 @@ import type { ClockEvent, TicketRow } from '@/lib/contracts/tickets';
 import { ticketDetail } from '@/lib/contracts/tickets';
 import { clockText, parseClock, unrollPastMidnight } from '@/lib/domain/time/clock-minutes';
 import { ApiFailure, apiSend } from '@/lib/queries/api';
+import { refreshPourDay } from '@/lib/queries/tickets';
+import type { ClockStyle } from '@/lib/text/format';
 import { clockFigure } from '@/lib/text/format';
 import { pourDayMessages } from '@/lib/text/messages/pour-day';
 import { failureText } from '@/lib/text/problems';
@@ -44,7 +46,7 @@ export function TruckClock({ load, name, isToday }: TruckClockProps) {
     try {
       const body = at === undefined ? { event } : { event, at };
       await apiSend('POST', `/api/tickets/${load.id}/clock`, body, ticketDetail);
-      await queries.invalidateQueries({ queryKey: ['pour-day'] });
+      await refreshPourDay(queries);
       return true;
     } catch (error) {
       if (!(error instanceof ApiFailure)) throw error;
@@ -85,7 +87,7 @@ export function TruckClock({ load, name, isToday }: TruckClockProps) {
               )}
             >
               {at === null ? words.clock[event] : words.clockDone[event]}
-              {at !== null && <span className="text-[15px]">{clockFigure(at, clock)}</span>}
+              {at !== null && <span className="text-[15px]">{shortClock(at, clock)}</span>}
             </button>
           );
         })}
@@ -112,6 +114,11 @@ export function TruckClock({ load, name, isToday }: TruckClockProps) {
       )}
     </div>
   );
+}
+
+/** On site the half of the day is plain; the button has no room for it. */
+function shortClock(at: number, clock: ClockStyle): string {
+  return clockFigure(at, clock).replace(/ [ap]m$/, '');
 }
 
 interface TimeDialogProps {

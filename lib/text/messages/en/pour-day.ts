@@ -104,6 +104,10 @@ export const pourDay = {
     reasons: ['Not our ticket', 'No ticket on the photo', 'Photographed twice', 'Load sent back'],
     setAsideDone: 'This ticket was set aside: its yards do not count.',
     restore: 'Check it again to bring it back.',
+    duplicateSays: (number: string) =>
+      `Ticket ${number} of this supplier is already here. If this is a second photo of it, add the photo to that ticket; if not, check the number.`,
+    staleSays:
+      'Somebody changed this ticket while you had it open. Open it again and repeat your change.',
     attach: 'Add this photo to that ticket',
     openAgain: 'Open it again',
     pickSupplier: 'Choose the supplier',

@@ -14,6 +14,7 @@ export const tickets = {
   allJobs: 'All jobs',
   from: 'From',
   to: 'To',
+  filters: 'Filters',
   clear: 'Clear filters',
   export: 'Export CSV',
   add: 'Type in a ticket',

@@ -106,6 +106,10 @@ export const pourDay: PourDayMessages = {
     reasons: ['No es nuestra', 'No hay boleta en la foto', 'Foto repetida', 'Carga devuelta'],
     setAsideDone: 'Esta boleta fue descartada: sus yardas no cuentan.',
     restore: 'Revísela otra vez para recuperarla.',
+    duplicateSays: (number) =>
+      `La boleta ${number} de este proveedor ya está aquí. Si es otra foto de la misma, agréguela a esa boleta; si no, revise el número.`,
+    staleSays:
+      'Alguien cambió esta boleta mientras usted la tenía abierta. Ábrala otra vez y repita su cambio.',
     attach: 'Agregar esta foto a esa boleta',
     openAgain: 'Abrirla otra vez',
     pickSupplier: 'Elija el proveedor',
