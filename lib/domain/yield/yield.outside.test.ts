@@ -1,6 +1,8 @@
 import { describe, expect, test } from 'vitest';
+import { aLine, aSheet, aTicket } from '../../../tests/support/facts';
 import { type Quantity, quantity } from '../money/money';
 import { ft3FromYd3, yd3FromFt3 } from '../units/volume';
+import { reconcile } from '../variance/reconcile';
 import { batchYieldFt3, impliedThicknessIn, overrunShare, relativeYield } from './measures';
 
 const q = (text: string) => quantity(text);
@@ -43,7 +45,22 @@ describe('yield', () => {
     expect(relativeYield(q(measured), q('1')).verdict).toBe(verdict);
   });
   test('CV-32 ordered 100, delivered 90, billed 100 (OASIS UBL 2.0 example documents)', () => {
-    expect(quantity(q('100').minus('90')).toFixed()).toBe('10');
     expect(overrunShare(q('100'), q('90'), q('0')).toFixed()).toBe('-0.1');
+    const { findings } = reconcile({
+      rateSheets: [aSheet([{ kind: 'mixPrice', mixCode: null, dollarsPerYd3: '1.00' }])],
+      orders: [],
+      tickets: [aTicket({ number: '565899', yards: '90' })],
+      pumpTickets: [],
+      billLines: [
+        aLine({ at: 1, ticket: '565899', quantity: '100', price: '1.00', amount: '100.00' }),
+      ],
+      earlierLines: [],
+      handMatches: [],
+      tolerances: {},
+      statement: null,
+    });
+    expect(findings.map(({ kind, difference }) => [kind, difference.toFixed(2)])).toEqual([
+      ['yardsDiffer', '10.00'],
+    ]);
   });
 });
