@@ -3,9 +3,9 @@ import { type Quantity, quantity } from '../money/money';
 
 /** Exact by definition: 1 yd = 0.9144 m, 1 ft = 0.3048 m, 1 in = 25.4 mm. */
 export const FT3_PER_YD3 = new Decimal(27);
-export const M3_PER_YD3 = new Decimal('0.9144').pow(3);
-export const M3_PER_FT3 = new Decimal('0.3048').pow(3);
-export const IN_PER_FT = new Decimal(12);
+const M3_PER_YD3 = new Decimal('0.9144').pow(3);
+const M3_PER_FT3 = new Decimal('0.3048').pow(3);
+const IN_PER_FT = new Decimal(12);
 
 const scaled = (value: Quantity, factor: Decimal) => quantity(value.times(factor));
 const divided = (value: Quantity, factor: Decimal) => quantity(value.dividedBy(factor));

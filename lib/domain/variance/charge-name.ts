@@ -22,7 +22,7 @@ function sameWord(one: string, other: string): boolean {
 }
 
 /** 0 to 1: how much of the agreed name the description holds. */
-export function nameShare(description: string, name: string): number {
+function nameShare(description: string, name: string): number {
   const wanted = tellingWords(name);
   const given = tellingWords(description);
   if (wanted.length === 0) return description.trim().toLowerCase() === name.toLowerCase() ? 1 : 0;
@@ -30,7 +30,7 @@ export function nameShare(description: string, name: string): number {
 }
 
 /** Whether a description says nothing but "fee" or "charge". */
-export function isNameless(description: string): boolean {
+function isNameless(description: string): boolean {
   return tellingWords(description).length === 0;
 }
 

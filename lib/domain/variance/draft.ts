@@ -4,7 +4,7 @@ import type { ExplanationStep } from '../rating/expected-line';
 import type { Finding, Tolerances, VarianceKind } from './finding';
 
 /** Two cents: what rounding in other places than ours may make of a line that agrees. */
-export const ROUNDING_SLACK = money('0.02');
+const ROUNDING_SLACK = money('0.02');
 
 export function withinSlack(one: Money, other: Money): boolean {
   return one.minus(other).abs().lte(ROUNDING_SLACK);

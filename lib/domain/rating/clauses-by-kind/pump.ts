@@ -40,7 +40,7 @@ function measuredTime(ticket: PumpTicketFacts, measured: 'onSite' | 'portalToPor
 }
 
 /** Hours rounded up to the step, at least the minimum. A step of zero leaves them exact. */
-export function chargedHours(minutes: number, minimum: Quantity, step: Quantity) {
+function chargedHours(minutes: number, minimum: Quantity, step: Quantity) {
   const exact = count(minutes).dividedBy(60);
   const rounded = step.isZero()
     ? exact

@@ -10,7 +10,7 @@ import { waitingRule } from './waiting';
 
 /** Every kind of clause, by what it is rated on. A new kind is one module and one line here. */
 
-export const LOAD_KINDS = [
+const LOAD_KINDS = [
   'mixPrice',
   'shortLoad',
   'waiting',
