@@ -9,6 +9,8 @@ import { useLocale } from '../ui/locale';
 import type { Sent, Shot } from './shots';
 import { dropShot, sendShot, useShots } from './shots';
 
+const FINAL: readonly string[] = ['wrongType', 'tooLarge', 'invalid', 'conflict', 'notFound'];
+
 /** Photos on their way, and those that could not be sent: kept here until they are. */
 export function UnsentPhotos({ onSent }: { onSent: (sent: Sent) => void }) {
   const shots = useShots();
@@ -26,17 +28,21 @@ function UnsentPhoto({ shot, onSent }: { shot: Shot; onSent: (sent: Sent) => voi
   const locale = useLocale();
   const words = pourDayMessages(locale);
   const preview = usePreview(shot.picture);
+  const [broken, setBroken] = useState(false);
+  // What the server refuses for what it is, it will refuse again.
+  const refused = FINAL.includes(shot.problem?.code ?? '');
   async function again() {
     const sent = await sendShot(shot.clientId);
     if (sent) onSent(sent);
   }
   return (
     <li className="relative flex gap-3 overflow-hidden border border-canary-deep bg-canary p-3">
-      {preview && (
+      {preview && !broken && (
         <Image
           unoptimized
           src={preview}
           alt=""
+          onError={() => setBroken(true)}
           width={64}
           height={64}
           className="size-16 shrink-0 object-cover"
@@ -46,14 +52,16 @@ function UnsentPhoto({ shot, onSent }: { shot: Shot; onSent: (sent: Sent) => voi
         <div className="min-w-0 flex-1" role="alert">
           <p className="font-semibold">{words.notSent}</p>
           <p className="text-[14px]">
-            {failureText(locale, shot.problem)} {words.kept}
+            {failureText(locale, shot.problem)} {!refused && words.kept}
           </p>
           <div className="mt-2 flex flex-wrap gap-2">
-            <Button className="min-h-14" onClick={again}>
-              {words.sendAgain}
-            </Button>
+            {!refused && (
+              <Button className="min-h-14" onClick={again}>
+                {words.sendAgain}
+              </Button>
+            )}
             <Button variant="quiet" className="min-h-14" onClick={() => dropShot(shot.clientId)}>
-              {words.dropPhoto}
+              {refused ? words.dropFile : words.dropPhoto}
             </Button>
           </div>
         </div>

@@ -22,7 +22,7 @@ export function LoadCard({ load, place, isToday }: LoadCardProps) {
   const number = load.number || load.reading?.number;
   const yards = load.quantityYd3 ?? load.reading?.quantityYd3;
   const truck = load.truck ?? load.reading?.truck;
-  const name = words.load(load.loadNumber ?? place);
+  const name = words.load(place);
   return (
     <article className="relative border border-canary-deep border-b-2 bg-canary px-3 pt-2.5 pb-3 [border-bottom-style:dotted]">
       <p className="flex flex-wrap items-baseline gap-x-2">
@@ -62,7 +62,7 @@ function ToCheck({ load }: { load: TicketRow }) {
       href={routes.pourDayTicket(load.id)}
       className="relative mt-2 flex min-h-14 items-center justify-between gap-3 overflow-hidden border-[1.5px] border-carbon bg-sheet px-3 font-semibold text-carbon no-underline"
     >
-      <span>{words.checkTicket}</span>
+      <span className="whitespace-nowrap">{words.checkTicket}</span>
       <span className="text-[14px] font-normal text-ink">{says}</span>
       {reads && <span aria-hidden className="busy-rule absolute inset-x-0 bottom-0 h-1" />}
     </Link>

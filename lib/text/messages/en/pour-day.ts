@@ -22,7 +22,7 @@ export const pourDay = {
   noLoads: 'No ticket yet. Photograph the first one when its truck arrives.',
   load: (count: number) => `Load ${count}`,
   truck: (truck: string) => `truck ${truck}`,
-  checkTicket: 'Check this ticket',
+  checkTicket: 'Check ticket',
   correct: 'Correct',
   reading: 'Reading the photo…',
   unread: 'Could not be read: type it in',
@@ -58,6 +58,7 @@ export const pourDay = {
   notSent: 'The photo was not sent',
   kept: 'It is kept on this page. Do not close the page before it is sent.',
   sendAgain: 'Try again',
+  dropFile: 'Close',
   dropPhoto: 'Throw this photo away',
   stale: 'No connection: these figures may be old.',
   cautions: [

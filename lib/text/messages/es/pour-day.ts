@@ -24,7 +24,7 @@ export const pourDay: PourDayMessages = {
   noLoads: 'Aún no hay boletas. Tome la foto de la primera cuando llegue el camión.',
   load: (count) => `Carga ${count}`,
   truck: (truck) => `camión ${truck}`,
-  checkTicket: 'Revisar esta boleta',
+  checkTicket: 'Revisar boleta',
   correct: 'Corregir',
   reading: 'Leyendo la foto…',
   unread: 'No se pudo leer: escríbala',
@@ -60,6 +60,7 @@ export const pourDay: PourDayMessages = {
   notSent: 'La foto no se envió',
   kept: 'Sigue guardada en esta página. No cierre la página antes de enviarla.',
   sendAgain: 'Intentar de nuevo',
+  dropFile: 'Cerrar',
   dropPhoto: 'Descartar esta foto',
   stale: 'Sin conexión: estas cifras pueden ser viejas.',
   cautions: [
