@@ -100,7 +100,6 @@ export const createTicketInput = z
 export const confirmTicketInput = z
   .strictObject({ ...addressed, ...ticketValues })
   .superRefine(agreeing);
-export const updateTicketInput = confirmTicketInput;
 export type TicketInput = z.output<typeof confirmTicketInput>;
 
 export const rejectTicketInput = z.strictObject({

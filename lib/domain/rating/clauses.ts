@@ -114,7 +114,6 @@ export const clauseSchema = z.discriminatedUnion('kind', [
 
 export type Clause = z.infer<typeof clauseSchema>;
 export type ClauseKind = Clause['kind'];
-export const CLAUSE_KINDS = clauseSchema.options.map((option) => option.shape.kind.value);
 
 /** A clause with the id by which expected lines and explanations refer to it. */
 export type IdentifiedClause = { readonly id: string; readonly clause: Clause };

@@ -1,5 +1,5 @@
 import { findTicket, updateTicket as storeTicket } from '../../../db/queries/tickets';
-import { ticketDetail as output, updateTicketInput } from '../../contracts/tickets';
+import { confirmTicketInput, ticketDetail as output } from '../../contracts/tickets';
 import { fail, ok } from '../../domain/result';
 import { failure, notFound } from '../failure';
 import { defineVerb } from '../verb';
@@ -20,7 +20,7 @@ export const updateTicket = defineVerb({
   kind: 'write',
   permission: 'tickets.write',
   http: { method: 'PUT', path: '/api/tickets/{ticketId}' },
-  input: updateTicketInput,
+  input: confirmTicketInput,
   output,
   async run(ctx, { ticketId, version, ...input }) {
     const before = await findTicket(ctx.scope, ticketId, crewLimit(ctx.actor));
