@@ -1,5 +1,5 @@
 import { TZDate } from '@date-fns/tz';
-import { format } from 'date-fns';
+import { addDays, format, parseISO } from 'date-fns';
 import type { ClockMinutes, PlainDate } from './domain/time/clock-minutes';
 import { readEnv } from './env';
 
@@ -30,4 +30,9 @@ export function clockMinutesIn(timeZone: string, moment: Date): ClockMinutes {
 export function startOfDay(timeZone: string, day: PlainDate, days = 0): Date {
   const [year = 0, month = 1, date = 1] = day.split('-').map(Number);
   return new Date(new TZDate(year, month - 1, date + days, timeZone).getTime());
+}
+
+/** The calendar day that many days later, or earlier when `days` is negative. */
+export function shiftDay(day: PlainDate, days: number): PlainDate {
+  return format(addDays(parseISO(day), days), 'yyyy-MM-dd');
 }

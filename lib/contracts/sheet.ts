@@ -59,6 +59,10 @@ export const SHEET_ROW_KINDS = [
   'document',
 ] as const;
 
+/** `notChecked`: no rate sheet says what it should be, so it can be accepted but not struck. */
+export const VERDICTS = ['agrees', 'withinTolerance', 'notChecked', 'finding'] as const;
+export type Verdict = (typeof VERDICTS)[number];
+
 export const sheetRow = z.object({
   key: z.string(),
   kind: z.enum(SHEET_ROW_KINDS),
@@ -92,7 +96,7 @@ export const sheetRow = z.object({
     .nullable(),
   expected: amount.nullable(),
   difference: amount,
-  verdict: z.enum(['agrees', 'withinTolerance', 'finding']),
+  verdict: z.enum(VERDICTS),
   findings: z.array(sheetFinding),
   sentence: z.string(),
   steps: z.array(step),
@@ -144,7 +148,6 @@ export const claimRowsInput = z.strictObject({
   /** A remark for whoever writes to the supplier. */
   note: z.string().trim().max(300).default(''),
 });
-export const unstrikeInput = strikeInput;
 
 export const settledRows = z.object({
   rows: z.array(z.object({ key: z.string(), settled: settlement.nullable() })),
@@ -165,7 +168,12 @@ export const matchByHandInput = z.strictObject({
   billLineId: uuid,
   deliveries: z.array(deliveryRef).min(1).max(60),
 });
-export const unmatchInput = z.strictObject({ statementId: uuid, billLineId: uuid });
+/** `nothing`: the line belongs to no delivery. `engine`: forget what a person said about it. */
+export const unmatchInput = z.strictObject({
+  statementId: uuid,
+  billLineId: uuid,
+  leaveTo: z.enum(['nothing', 'engine']),
+});
 export const matchOutput = z.object({ billLineId: uuid });
 
 export const candidatesInput = z.strictObject({

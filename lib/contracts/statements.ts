@@ -3,14 +3,15 @@ import { pageInput, pageOf, plainDate, uuid } from './common';
 
 export const STATEMENT_SORTS = ['period', 'supplier', 'number', 'billed', 'against'] as const;
 
-export const listStatementsInput = z.strictObject({
-  ...pageInput,
+const filters = {
   status: z.enum(['open', 'closed', 'all']).default('all'),
   supplierId: uuid.optional(),
   search: z.string().trim().max(80).default(''),
   sort: z.enum(STATEMENT_SORTS).default('period'),
   direction: z.enum(['up', 'down']).default('down'),
-});
+};
+export const listStatementsInput = z.strictObject({ ...pageInput, ...filters });
+export const exportStatementsInput = z.strictObject(filters);
 
 export const statementRow = z.object({
   id: uuid,
@@ -40,6 +41,8 @@ export const listStatementsOutput = z.object({
 });
 
 export const statementRef = z.strictObject({ statementId: uuid });
+/** One statement, or all that are open. */
+export const refreshInput = z.strictObject({ statementId: uuid.optional() });
 export const reopenStatementInput = z.strictObject({
   statementId: uuid,
   reason: z.string().trim().min(1, 'needed').max(300),

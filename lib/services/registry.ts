@@ -5,6 +5,12 @@ import { updateAccount } from './account/update-account';
 import { listActivity } from './activity/list-activity';
 import { getCompany } from './company/get-company';
 import { updateCompany } from './company/update-company';
+import { acceptImport } from './imports/accept-import';
+import { discardImport } from './imports/discard-import';
+import { listImports } from './imports/list-imports';
+import { previewImport } from './imports/preview-import';
+import { setImportLayout } from './imports/set-import-layout';
+import { uploadImport } from './imports/upload-import';
 import { createJob } from './jobs/create-job';
 import { getJob } from './jobs/get-job';
 import { listJobs } from './jobs/list-jobs';
@@ -28,6 +34,21 @@ import { createPumpTicket } from './pump-tickets/create-pump-ticket';
 import { getPumpTicket } from './pump-tickets/get-pump-ticket';
 import { listPumpTickets } from './pump-tickets/list-pump-tickets';
 import { updatePumpTicket } from './pump-tickets/update-pump-ticket';
+import { acceptRows } from './statements/accept-rows';
+import { claimRows } from './statements/claim-rows';
+import { closeStatement } from './statements/close-statement';
+import { exportSheet } from './statements/export-sheet';
+import { exportStatements } from './statements/export-statements';
+import { getSheet } from './statements/get-sheet';
+import { listStatements } from './statements/list-statements';
+import { matchByHand } from './statements/match-by-hand';
+import { matchCandidates } from './statements/match-candidates';
+import { refreshFindings } from './statements/refresh-findings';
+import { reopenStatement } from './statements/reopen-statement';
+import { strikeRows } from './statements/strike-rows';
+import { undoLast } from './statements/undo';
+import { unmatchLine } from './statements/unmatch-line';
+import { unstrikeRows } from './statements/unstrike-rows';
 import { attachTicket } from './tickets/attach-ticket';
 import { confirmTicket } from './tickets/confirm-ticket';
 import { createTicket } from './tickets/create-ticket';
@@ -38,6 +59,8 @@ import { rejectTicket } from './tickets/reject-ticket';
 import { setClock } from './tickets/set-clock';
 import { ticketChoices } from './tickets/ticket-choices';
 import { updateTicket } from './tickets/update-ticket';
+import { exportVariances } from './variances/export-variances';
+import { listVariances } from './variances/list-variances';
 import type { Verb } from './verb';
 
 /** Every verb there is: the API's description and the generated tests go through this list. */
@@ -83,4 +106,27 @@ export const REGISTRY = [
   rejectTicket,
   attachTicket,
   setClock,
+  uploadImport,
+  listImports,
+  previewImport,
+  setImportLayout,
+  acceptImport,
+  discardImport,
+  listStatements,
+  exportStatements,
+  getSheet,
+  exportSheet,
+  refreshFindings,
+  strikeRows,
+  acceptRows,
+  claimRows,
+  unstrikeRows,
+  undoLast,
+  matchCandidates,
+  matchByHand,
+  unmatchLine,
+  closeStatement,
+  reopenStatement,
+  listVariances,
+  exportVariances,
 ] as unknown as readonly Verb[];

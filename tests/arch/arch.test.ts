@@ -32,7 +32,7 @@ describe('dependencies', () => {
   });
 });
 
-const IMPURE = /\bDate\.now\b|new Date\(\)|Math\.random|\bprocess\.|\bfetch\(|\basync\b|node:/;
+const IMPURE = /\bDate\.now\b|new Date\(\)|Math\.random|\bprocess\.|\bfetch\(|\basync\b|['"]node:/;
 
 describe('the core', () => {
   test('is pure: no clock, no chance, no input or output', () => {

@@ -1,17 +1,16 @@
 import { listTickets } from '../../../db/queries/ticket-list';
-import { dayIn } from '../../clock';
 import { photoFile as fileAnswer } from '../../contracts/photos';
 import type { TicketRow } from '../../contracts/tickets';
 import { exportTicketsInput } from '../../contracts/tickets';
 import { ok } from '../../domain/result';
 import { clockText } from '../../domain/time/clock-minutes';
-import { csvText } from '../csv-text';
+import { type CsvColumn, csvFile } from '../csv-file';
 import { defineVerb } from '../verb';
 import { crewLimit } from './internal';
 
 const time = (minutes: number | null) => (minutes === null ? '' : clockText(minutes));
 
-const COLUMNS: readonly [string, (row: TicketRow) => string | number | null][] = [
+const COLUMNS: readonly CsvColumn<TicketRow>[] = [
   ['Date', (row) => row.date],
   ['Ticket', (row) => row.number],
   ['Supplier', (row) => row.supplierName],
@@ -43,12 +42,6 @@ export const exportTickets = defineVerb({
   async run({ scope, actor, clock, company }, filters) {
     const filter = { ...filters, crewMemberId: crewLimit(actor) };
     const { rows } = await listTickets(scope, filter, { offset: 0, limit: null });
-    const lines = rows.map((row) => COLUMNS.map(([, read]) => read(row)));
-    return ok({
-      bytes: new TextEncoder().encode(csvText([COLUMNS.map(([title]) => title), ...lines])),
-      mediaType: 'text/csv; charset=utf-8',
-      fileName: `tickets-${dayIn(company.timeZone, clock.now())}.csv`,
-      inline: false,
-    });
+    return ok(csvFile({ clock, company }, 'tickets', COLUMNS, rows));
   },
 });
