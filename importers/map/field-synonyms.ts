@@ -20,6 +20,8 @@ const SYNONYMS: Readonly<Record<TargetField, readonly string[]>> = {
     'posting date',
     'work date',
     'datum',
+    'date delivered',
+    'delivered on',
   ],
   ticketNumber: [
     'ticket',

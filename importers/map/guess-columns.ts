@@ -8,7 +8,7 @@ import {
 } from '../core/layout';
 import type { COLUMN_CONFIDENCES } from '../core/plan';
 import { type ColumnContent, describeColumn, findProduct } from './column-content';
-import { synonymRank, titleMatches } from './field-synonyms';
+import { normaliseTitle, synonymRank, titleMatches } from './field-synonyms';
 
 export interface ColumnGuess {
   readonly column: number;
@@ -45,7 +45,16 @@ function bearsOut(field: TargetField, content: ColumnContent): number {
   return 1;
 }
 
+/** Titles over either words or codes; the cells decide. */
+const WORDS_OR_CODES: ReadonlySet<string> = new Set(['product', 'material']);
+
 function fromTitle(title: string, column: number, content: ColumnContent): Candidate[] {
+  const isOverCodes =
+    WORDS_OR_CODES.has(normaliseTitle(title)) && content.filled > 0 && content.words < 0.3;
+  if (isOverCodes) {
+    const why = `titled “${title.trim()}”, its cells are codes`;
+    return [{ column, field: 'mixCode', confidence: 'likely', why, score: 90 }];
+  }
   return titleMatches(title).map((match) => {
     const base = match.exact ? 100 - synonymRank(title) : 40 + match.weight + (match.last ? 15 : 0);
     return {

@@ -4,7 +4,7 @@ import type { Store } from '../../db/client';
 import { closeStoreForGood, openStore } from '../../db/client';
 import { DataFolderInUse } from '../../db/lock';
 import { companies } from '../../db/schema/companies';
-import { seedDemo } from '../../db/seed';
+import { finishDemo, seedDemo } from '../../db/seed';
 import { systemClock } from '../clock';
 import type { Env } from '../env';
 import { readEnv } from '../env';
@@ -28,6 +28,7 @@ export async function startServing(): Promise<void> {
     log.info('the database is empty: loading the demo company');
     await seedDemo(store, systemClock);
   }
+  if (env.demo) await finishDemo(store, systemClock);
   const worker = startWorker({ store, clock: systemClock, handlers: HANDLERS });
   const maintenance = startMaintenance(store, env);
   const stop = async () => {

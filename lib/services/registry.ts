@@ -5,6 +5,8 @@ import { updateAccount } from './account/update-account';
 import { listActivity } from './activity/list-activity';
 import { getCompany } from './company/get-company';
 import { updateCompany } from './company/update-company';
+import { getDemoFile } from './demo/get-demo-file';
+import { listDemoFiles } from './demo/list-demo-files';
 import { acceptImport } from './imports/accept-import';
 import { discardImport } from './imports/discard-import';
 import { listImports } from './imports/list-imports';
@@ -129,4 +131,6 @@ export const REGISTRY = [
   reopenStatement,
   listVariances,
   exportVariances,
+  listDemoFiles,
+  getDemoFile,
 ] as unknown as readonly Verb[];
