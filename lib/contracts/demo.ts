@@ -5,7 +5,7 @@ export const DEMO_FILES = [
   { name: 'cinder-ridge-2026-11.csv', kind: 'statement', of: 'Cinder Ridge Ready-Mix' },
   { name: 'halvorsen-2026-11.csv', kind: 'statement', of: 'Halvorsen Concrete' },
   { name: 'longreach-2026-11.csv', kind: 'statement', of: 'Longreach Pumping' },
-  { name: 'tri-county-2026-11.csv', kind: 'statement', of: 'Tri-County Line Pump' },
+  { name: 'tri-county-2026-11.csv', kind: 'statement', of: 'Tri-County Pump' },
   { name: '558901.jpg', kind: 'ticket', of: 'Cinder Ridge Ready-Mix' },
   { name: '558902.jpg', kind: 'ticket', of: 'Cinder Ridge Ready-Mix' },
   { name: '558903.jpg', kind: 'ticket', of: 'Cinder Ridge Ready-Mix' },
@@ -22,6 +22,4 @@ export type DemoFile = z.infer<typeof demoFile>;
 
 export const listDemoFilesInput = z.strictObject({});
 export const listDemoFilesOutput = z.object({ rows: z.array(demoFile) });
-export const getDemoFileInput = z.strictObject({
-  name: z.enum(DEMO_FILES.map((file) => file.name)),
-});
+export const getDemoFileInput = z.strictObject({ name: z.string().max(80) });

@@ -3,6 +3,7 @@ import { CHARGE_KINDS } from '../domain/facts';
 import { MATCH_METHODS } from '../domain/matching/match';
 import { VARIANCE_KINDS } from '../domain/variance/finding';
 import { plainDate, uuid } from './common';
+import { timeStyle } from './tickets';
 
 /** Amounts and quantities are decimal text throughout. */
 const amount = z.string();
@@ -126,6 +127,8 @@ export const sheet = z.object({
     closedAt: z.iso.datetime().nullable(),
     closedBy: z.string().nullable(),
   }),
+  /** How the company writes moments. */
+  times: timeStyle,
   rows: z.array(sheetRow),
   /** Tickets of the supplier and period that nobody has checked yet: they prove nothing. */
   ticketsToCheck: z.number().int(),

@@ -7,7 +7,7 @@ import { notFound } from '../failure';
 import { defineVerb } from '../verb';
 import { workOut } from './keep-findings';
 
-export function headOf(statement: StoredStatement): Sheet['statement'] {
+function headOf(statement: StoredStatement): Sheet['statement'] {
   return {
     id: statement.id,
     number: statement.number,
@@ -24,11 +24,14 @@ export function headOf(statement: StoredStatement): Sheet['statement'] {
   };
 }
 
+const timesOf = ({ company }: Ctx) => ({ timeZone: company.timeZone, clock: company.clock });
+
 /** The sheet as it is now, or as it stood when the statement was closed. */
 export async function sheetOf(ctx: Ctx, statement: StoredStatement): Promise<Sheet> {
   if (statement.status === 'closed') {
     return {
       statement: headOf(statement),
+      times: timesOf(ctx),
       rows: sheetRow.array().parse(statement.closedRows),
       ticketsToCheck: 0,
       upToDate: true,
@@ -37,6 +40,7 @@ export async function sheetOf(ctx: Ctx, statement: StoredStatement): Promise<She
   const { facts, rows, upToDate } = await workOut(ctx.scope, statement, ctx.company);
   return {
     statement: headOf(statement),
+    times: timesOf(ctx),
     rows: [...rows],
     ticketsToCheck: facts.ticketsToCheck,
     upToDate,

@@ -55,7 +55,7 @@ export const matchCandidates = defineVerb({
   says: 'List the deliveries that a billed line could be for, the likeliest first',
   kind: 'read',
   permission: 'statements.read',
-  http: { method: 'GET', path: '/api/statements/{statementId}/candidates' },
+  http: { method: 'GET', path: '/api/statements/{statementId}/lines/{billLineId}/candidates' },
   input: candidatesInput,
   output: candidatesOutput,
   async run({ scope }, { statementId, billLineId, search }) {

@@ -2,6 +2,7 @@
 
 import { keepPreviousData, useQuery } from '@tanstack/react-query';
 import type { z } from 'zod';
+import { sameQuery } from '@/components/shell/list-query';
 import { useListFilter } from '@/components/shell/use-list-filter';
 import { Button } from '@/components/ui/button';
 import { EmptyState } from '@/components/ui/empty';
@@ -15,7 +16,6 @@ import { dayOfMoment, dayText } from '@/lib/text/format';
 import { company } from '@/lib/text/messages/en/company';
 import { ActivityEntry } from './activity-entry';
 import { ActivityFilters } from './activity-filters';
-import { sameQuery } from './list-query';
 
 const words = company.activity;
 const ROWS = 100;

@@ -3,6 +3,7 @@
 import { keepPreviousData, useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import type { z } from 'zod';
+import { sameQuery } from '@/components/shell/list-query';
 import { useListFilter } from '@/components/shell/use-list-filter';
 import { EmptyState } from '@/components/ui/empty';
 import { SelectField } from '@/components/ui/field';
@@ -16,7 +17,6 @@ import type { listOutboxOutput } from '@/lib/contracts/outbox';
 import { MAIL_STATES } from '@/lib/contracts/outbox';
 import { outboxQuery } from '@/lib/queries/company';
 import { company } from '@/lib/text/messages/en/company';
-import { sameQuery } from './list-query';
 import { MessageDialog } from './message-dialog';
 
 const words = company.outbox;

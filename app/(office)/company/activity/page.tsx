@@ -1,10 +1,10 @@
 import type { Metadata } from 'next';
+import { listQuery } from '@/components/shell/list-query';
 import { ask, requirePage } from '@/lib/http/page';
 import { listActivity } from '@/lib/services/activity/list-activity';
 import { listPeople } from '@/lib/services/people/list-people';
 import { company as words } from '@/lib/text/messages/en/company';
 import { ActivityLog } from '../_components/activity-log';
-import { listQuery } from '../_components/list-query';
 
 export const metadata: Metadata = { title: words.sections.activity };
 

@@ -1,8 +1,8 @@
 import type { Metadata } from 'next';
+import { listQuery } from '@/components/shell/list-query';
 import { ask, requirePage } from '@/lib/http/page';
 import { listOutbox } from '@/lib/services/outbox/list-outbox';
 import { company as words } from '@/lib/text/messages/en/company';
-import { listQuery } from '../_components/list-query';
 import { OutboxList } from '../_components/outbox-list';
 
 export const metadata: Metadata = { title: words.sections.outbox };

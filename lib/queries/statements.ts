@@ -1,0 +1,72 @@
+import type { QueryClient } from '@tanstack/react-query';
+import { queryOptions } from '@tanstack/react-query';
+import { listDemoFilesOutput } from '../contracts/demo';
+import { importPreview, listImportsOutput } from '../contracts/imports';
+import { candidatesOutput, refreshOutput, sheet } from '../contracts/sheet';
+import { listStatementsOutput } from '../contracts/statements';
+import { listVariancesOutput } from '../contracts/variances';
+import { apiGet, apiSend } from './api';
+
+type Query = Readonly<Record<string, string>>;
+
+export const statementsQuery = (query: Query) =>
+  queryOptions({
+    queryKey: ['statements', 'list', query],
+    queryFn: () => apiGet('/api/statements', listStatementsOutput, query),
+  });
+
+export const sheetQuery = (statementId: string) =>
+  queryOptions({
+    queryKey: ['statements', 'sheet', statementId],
+    queryFn: () => apiGet(`/api/statements/${statementId}/sheet`, sheet),
+  });
+
+export const candidatesQuery = (statementId: string, billLineId: string, search: string) =>
+  queryOptions({
+    queryKey: ['statements', 'candidates', statementId, billLineId, search],
+    queryFn: () =>
+      apiGet(`/api/statements/${statementId}/lines/${billLineId}/candidates`, candidatesOutput, {
+        search,
+      }),
+  });
+
+export const importsQuery = () =>
+  queryOptions({
+    queryKey: ['imports', 'list'],
+    queryFn: () => apiGet('/api/imports', listImportsOutput),
+  });
+
+export const importPreviewQuery = (importId: string) =>
+  queryOptions({
+    queryKey: ['imports', 'one', importId],
+    queryFn: () => apiGet(`/api/imports/${importId}`, importPreview),
+  });
+
+export const variancesQuery = (query: Query) =>
+  queryOptions({
+    queryKey: ['variances', query],
+    queryFn: () => apiGet('/api/variances', listVariancesOutput, query),
+  });
+
+export const demoFilesQuery = () =>
+  queryOptions({
+    queryKey: ['demo', 'files'],
+    queryFn: () => apiGet('/api/demo/files', listDemoFilesOutput),
+    staleTime: Number.POSITIVE_INFINITY,
+  });
+
+/** Fetches a demo file as if it had been chosen from the device. */
+export async function demoFile(name: string): Promise<File> {
+  const answer = await fetch(`/api/demo/files/${encodeURIComponent(name)}`);
+  if (!answer.ok) throw new Error(`The demo file ${name} did not come: ${answer.status}`);
+  return new File([await answer.blob()], name);
+}
+
+/** Has findings kept as today's facts make them: one statement's, or those of all open ones. */
+export async function refreshFindings(queries: QueryClient, statementId?: string): Promise<void> {
+  const body = statementId ? { statementId } : {};
+  const { changed } = await apiSend('POST', '/api/statements/refresh', body, refreshOutput);
+  if (!changed) return;
+  await queries.invalidateQueries({ queryKey: ['statements'] });
+  await queries.invalidateQueries({ queryKey: ['variances'] });
+}
