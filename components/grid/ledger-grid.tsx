@@ -56,7 +56,7 @@ const theme = themeQuartz.withParams({
   borderRadius: 0,
   rowHeight: 36,
   headerHeight: 30,
-  cellHorizontalPadding: 8,
+  cellHorizontalPadding: 6,
   spacing: 6,
   columnBorder: false,
 });
@@ -103,17 +103,20 @@ export function LedgerGrid<Row>(props: LedgerGridProps<Row>) {
     [keyOf, onSelect],
   );
 
-  useEffect(() => {
+  const showChosen = useCallback(() => {
     const grid = api.current;
-    if (!grid || selectedKey === null) return;
-    const node = grid.getRowNode(selectedKey);
-    if (node?.rowIndex === null || node?.rowIndex === undefined) return;
+    if (!grid || selected.current === null) return;
+    const index = grid.getRowNode(selected.current)?.rowIndex;
+    if (index === null || index === undefined) return;
     const at = grid.getFocusedCell();
-    if (at?.rowIndex === node.rowIndex) return;
-    grid.ensureIndexVisible(node.rowIndex);
+    if (at?.rowIndex === index) return;
+    grid.ensureIndexVisible(index);
     const column = at?.column ?? grid.getAllDisplayedColumns()[0];
-    if (column) grid.setFocusedCell(node.rowIndex, column);
-  }, [selectedKey]);
+    if (column) grid.setFocusedCell(index, column);
+  }, []);
+
+  // biome-ignore lint/correctness/useExhaustiveDependencies: a newly chosen row is what to follow
+  useEffect(showChosen, [selectedKey, showChosen]);
 
   const defaultColumn = useMemo<ColDef<Row>>(
     () => ({
@@ -136,8 +139,8 @@ export function LedgerGrid<Row>(props: LedgerGridProps<Row>) {
         getRowId={({ data }) => keyOf(data)}
         rowClassRules={rowClasses}
         ensureDomOrder
-        suppressCellFocus={false}
         suppressColumnVirtualisation
+        alwaysShowVerticalScroll
         animateRows={false}
         tooltipShowDelay={500}
         overlayNoRowsTemplate={`<span>${noRows}</span>`}
@@ -145,6 +148,7 @@ export function LedgerGrid<Row>(props: LedgerGridProps<Row>) {
           api.current = event.api;
         }}
         onModelUpdated={reportOrder}
+        onFirstDataRendered={showChosen}
         onCellFocused={focused}
       />
     </section>

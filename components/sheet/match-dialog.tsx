@@ -68,6 +68,7 @@ function Choices({ statementId, row, lineId, onClose, actions }: ChoicesProps) {
       </p>
       <SearchField label={words.matchSearch} value={search} onSearch={setSearch} />
       <ul className="max-h-[38dvh] overflow-y-auto border-y border-wet">
+        {!data && <li className="p-3 text-ink-soft">{common.loading}</li>}
         {data?.rows.length === 0 && <li className="p-3 text-ink-soft">{words.matchEmpty}</li>}
         {data?.rows.map((one) => (
           <li key={one.id} className="border-b border-cured last:border-0">

@@ -52,6 +52,9 @@ const edge = (copy: string) => ({
   headerClass: `${copy} copy-edge`,
 });
 
+/** The column of amounts says what they are; the sign would only take room. */
+const bareRate = (text: string) => rateFigure(text).replace('$', '');
+
 const only = (row: SheetRow) => (row.deliveries.length === 1 ? row.deliveries[0] : undefined);
 
 /** What a row is short of on a side: said in words, never left as a hole. */
@@ -79,35 +82,47 @@ export function findingText(row: SheetRow): string {
   return row.findings.map((finding) => varianceKinds[finding.kind]).join(', ');
 }
 
+/** The finding with what was decided about it, where that is more than a stroke. */
+function decidedText(row: SheetRow): string {
+  const { settled } = row;
+  if (settled === null || settled.state === 'struck') return findingText(row);
+  return `${words.states[settled.state]}: ${findingText(row)}`;
+}
+
 const orderedColumns: Column[] = [
   text(
     words.columns.job,
     (row) =>
       row.ordered?.jobName ?? row.billed?.jobName ?? (row.kind === 'charge' ? words.noOrder : ''),
-    { flex: 2, minWidth: 120, tooltipValueGetter: ({ data }) => data?.ordered?.orderNumber ?? '' },
+    {
+      flex: 3,
+      minWidth: 104,
+      tooltipValueGetter: ({ data }) =>
+        [data?.ordered?.jobName, data?.ordered?.orderNumber].filter(Boolean).join(', '),
+    },
   ),
   text(words.columns.mix, (row) => row.ordered?.mixCode ?? '', {
-    width: 76,
+    width: 58,
     cellClass: 'font-code',
   }),
   figure(words.columns.orderedYards, (row) => row.ordered?.quantityYd3 ?? null, yardsFigure, {
-    width: 88,
+    width: 64,
   }),
 ];
 
 const deliveredColumns: Column[] = [
   text(words.columns.ticket, ticketText, {
-    width: 92,
+    width: 74,
     cellClass: 'copy-delivered copy-edge font-code',
     headerClass: 'copy-delivered copy-edge',
   }),
   text(words.columns.date, (row) => row.deliveries[0]?.date ?? '', {
-    width: 74,
+    width: 62,
     valueFormatter: ({ value }) => (value ? dayWithoutYear(value) : ''),
     ...delivered,
   }),
   figure(words.columns.deliveredYards, (row) => only(row)?.quantityYd3 ?? null, yardsFigure, {
-    width: 70,
+    width: 58,
     ...delivered,
   }),
   text(
@@ -117,7 +132,7 @@ const deliveredColumns: Column[] = [
       return minutes === null ? '' : words.minutes(minutes);
     },
     {
-      width: 76,
+      width: 66,
       comparator: (_one, _other, left, right) =>
         (left.data?.deliveries[0]?.onSiteMinutes ?? -1) -
         (right.data?.deliveries[0]?.onSiteMinutes ?? -1),
@@ -129,45 +144,42 @@ const deliveredColumns: Column[] = [
 
 const billedColumns: Column[] = [
   text(words.columns.line, lineText, {
-    flex: 2,
-    minWidth: 130,
+    flex: 3,
+    minWidth: 108,
     tooltipValueGetter: ({ data }) => data?.billed?.description ?? '',
     ...edge('copy-billed'),
   }),
   figure(words.columns.quantity, (row) => row.billed?.quantity ?? null, decimalFigure, {
-    width: 74,
+    width: 60,
     ...billed,
   }),
-  figure(words.columns.rate, (row) => row.billed?.unitPrice ?? null, rateFigure, {
-    width: 84,
+  figure(words.columns.rate, (row) => row.billed?.unitPrice ?? null, bareRate, {
+    width: 70,
     ...billed,
   }),
   figure(words.columns.amount, (row) => row.billed?.amount ?? null, decimalFigure, {
-    width: 96,
+    width: 78,
     ...billed,
   }),
 ];
 
 const findingColumns: Column[] = [
-  text(words.columns.finding, findingText, {
-    flex: 2,
-    minWidth: 150,
+  text(words.columns.finding, decidedText, {
+    flex: 3,
+    minWidth: 124,
     ...edge(''),
     cellClassRules: { 'font-semibold': ({ data }) => data?.verdict === 'finding' },
     tooltipValueGetter: ({ data }) => data?.findings[0]?.sentence ?? data?.sentence ?? '',
   }),
-  figure(words.columns.expected, (row) => row.expected, decimalFigure, { width: 94 }),
+  figure(words.columns.expected, (row) => row.expected, decimalFigure, { width: 78 }),
   figure(words.columns.difference, (row) => row.difference, differenceFigure, {
-    width: 98,
+    width: 82,
     cellClassRules: {
       'text-keel font-semibold': ({ data }) =>
         data !== undefined && data.verdict === 'finding' && signOf(data.difference) === 'positive',
       'text-moss font-semibold': ({ data }) =>
         data !== undefined && data.verdict === 'finding' && signOf(data.difference) === 'negative',
     },
-  }),
-  text(words.columns.settled, (row) => (row.settled ? words.states[row.settled.state] : ''), {
-    width: 92,
   }),
 ];
 

@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto';
-import { and, desc, eq, inArray } from 'drizzle-orm';
+import { and, desc, eq, inArray, sql } from 'drizzle-orm';
 import type { ImportLayout } from '../../importers/core/layout';
 import type { PendingImport } from '../../lib/contracts/imports';
 import { newId } from '../../lib/ids';
@@ -110,42 +110,36 @@ export async function pendingImports(scope: Scope): Promise<PendingImport[]> {
 
 const hashOf = (signature: string) => createHash('sha256').update(signature).digest('hex');
 
-/** The layout last confirmed for files of this supplier with these titles. */
-export async function rememberedLayout(
-  scope: Scope,
-  supplierId: string,
-  headerSignature: string,
-): Promise<unknown> {
-  const [row] = await scope.handle
+/** Layouts confirmed for the supplier's files, the latest first. */
+export async function rememberedLayouts(scope: Scope, supplierId: string): Promise<unknown[]> {
+  const rows = await scope.handle
     .select({ layout: importLayouts.layout })
     .from(importLayouts)
     .where(
-      and(
-        eq(importLayouts.companyId, scope.companyId),
-        eq(importLayouts.supplierId, supplierId),
-        eq(importLayouts.headerSignature, hashOf(headerSignature)),
-      ),
-    );
-  return row?.layout ?? null;
+      and(eq(importLayouts.companyId, scope.companyId), eq(importLayouts.supplierId, supplierId)),
+    )
+    .orderBy(desc(importLayouts.createdAt), desc(importLayouts.id))
+    .limit(20);
+  return rows.map((row) => row.layout);
 }
 
+/** Keeps how a file was read, under its titles; files without titles share one place. */
 export async function rememberLayout(
   scope: Scope,
   supplierId: string,
   layout: ImportLayout,
 ): Promise<void> {
-  if (layout.headerSignature === null) return;
   await scope.handle
     .insert(importLayouts)
     .values({
       companyId: scope.companyId,
       id: newId<'importLayout'>(),
       supplierId,
-      headerSignature: hashOf(layout.headerSignature),
+      headerSignature: hashOf(layout.headerSignature ?? ''),
       layout,
     })
     .onConflictDoUpdate({
       target: [importLayouts.companyId, importLayouts.supplierId, importLayouts.headerSignature],
-      set: { layout },
+      set: { layout, createdAt: sql`now()` },
     });
 }

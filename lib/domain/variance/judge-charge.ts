@@ -23,7 +23,7 @@ export function judgeCharge(
   const clauseId = owed[0]?.clauseId ?? null;
   const due = sumMoney(owed.map((line) => line.amount));
   if (due.isZero() && !withinSlack(due, amount)) {
-    const sentence = `${why.sentence} Billed are ${dollars(amount)}.`;
+    const sentence = `${why.sentence} The bill says ${dollars(amount)}.`;
     return nothingOwed(kinds.notOwed, amount, sentence, why.steps, clauseId);
   }
   const figures = billedFigures(at.line);
@@ -34,7 +34,7 @@ export function judgeCharge(
       kind: kinds.wrong,
       present: !withinSlack(reached, due),
       reached,
-      sentence: `${why.sentence} Billed are ${dollars(reached)}; ${dollars(reached)} − ${dollars(due)} = ${apart}.`,
+      sentence: `${why.sentence} The bill says ${dollars(reached)}; ${dollars(reached)} − ${dollars(due)} = ${apart}.`,
       steps: [
         ...why.steps,
         { label: 'Billed', value: dollars(reached) },
@@ -73,7 +73,7 @@ export function judgePumpYards(at: LineCase, expected: readonly ExpectedLine[]):
       kind: 'pumpYardsDiffer',
       present: !withinSlack(atAgreed, due),
       reached: atAgreed,
-      sentence: `${why.sentence} Billed are ${yards(billed)}, ${yards(charged)} are owed; ${yardsStep}.`,
+      sentence: `${why.sentence} The bill says ${yards(billed)}, ${yards(charged)} are owed; ${yardsStep}.`,
       steps: [
         ...why.steps,
         { label: 'Billed', value: yards(billed) },

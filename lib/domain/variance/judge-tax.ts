@@ -208,7 +208,7 @@ export function judgeTax(scope: TaxScope): Map<string, Judgement> {
     }
     const others = sumMoney(taxLines.slice(0, -1).map((one) => one.amount));
     const expected = subtract(owed.amount, others);
-    const sentence = `${why} Billed are ${dollars(billed)}: ${diagnosis(scope, owed, billed)}.`;
+    const sentence = `${why} The bill says ${dollars(billed)}: ${diagnosis(scope, owed, billed)}.`;
     const clauseId = owed.tax?.id ?? null;
     const finding = {
       kind: 'taxWrong',

@@ -44,7 +44,7 @@ function timeCause(
     kind: words.timeKind,
     present: billed !== null && !withinSlack(reached, expected),
     reached,
-    sentence: `${why.sentence} Billed are ${figure(billed ?? charged)} ${unit} of ${what}, ${figure(charged)} are owed; ${arithmetic}.`,
+    sentence: `${why.sentence} The bill says ${figure(billed ?? charged)} ${unit} of ${what}, ${figure(charged)} are owed; ${arithmetic}.`,
     steps: [
       ...why.steps,
       { label: 'Billed', value: `${figure(billed ?? charged)} ${unit}` },
@@ -85,7 +85,7 @@ function lumpCause(at: LineCase, owed: readonly Owed[], words: TimeWords): Cause
     kind: words.priceKind,
     present: true,
     reached: at.line.amount,
-    sentence: `${why.sentence} Billed are ${dollars(at.line.amount)} for ${words.what}.`,
+    sentence: `${why.sentence} The bill says ${dollars(at.line.amount)} for ${words.what}.`,
     steps: [...why.steps, { label: 'Billed', value: dollars(at.line.amount) }],
   };
 }
@@ -128,7 +128,7 @@ export function judgeNotProvable(
   const { amount } = at.line;
   const why = explain(expected);
   const clauseId = expected[0]?.clauseId || null;
-  const sentence = `${why.sentence} Billed are ${dollars(amount)}.`;
+  const sentence = `${why.sentence} The bill says ${dollars(amount)}.`;
   const steps = [...why.steps, { label: 'Billed', value: dollars(amount) }];
   const inRange = amount.gte(lowest) && (highest === null || amount.lte(highest));
   const kind = inRange ? kinds.inRange : kinds.outside;
@@ -152,7 +152,7 @@ export function judgeWaiting(at: LineCase, expected: readonly ExpectedLine[]): J
   const why = explain(owed);
   const { amount } = at.line;
   if (owed.every((line) => line.amount.isZero())) {
-    const sentence = `${why.sentence} Billed are ${dollars(amount)}.`;
+    const sentence = `${why.sentence} The bill says ${dollars(amount)}.`;
     return nothingOwed('waitingNotOwed', amount, sentence, why.steps, owed[0]?.clauseId);
   }
   return judgeTime(at, owed, {

@@ -1,4 +1,4 @@
-import { rememberedLayout, type StoredImport } from '../../../db/queries/imports';
+import { rememberedLayouts, type StoredImport } from '../../../db/queries/imports';
 import { rowKeysOf } from '../../../db/queries/statements';
 import type { Scope } from '../../../db/tx';
 import { importLayoutSchema } from '../../../importers/core/layout';
@@ -30,15 +30,15 @@ export async function readImport(
     return { preview: readBillCsv({ ...file, layout: chosen.data }), layoutFrom: 'chosen' };
   }
   const guessed = readBillCsv(file);
-  const titles = guessed.layout.headerSignature;
-  if (titles !== null) {
-    const kept = await rememberedLayout(scope, stored.supplierId, titles);
+  for (const kept of await rememberedLayouts(scope, stored.supplierId)) {
     const remembered = importLayoutSchema.safeParse(kept);
-    if (remembered.success) {
-      return {
-        preview: readBillCsv({ ...file, layout: remembered.data }),
-        layoutFrom: 'remembered',
-      };
+    if (!remembered.success) continue;
+    const layout = remembered.data;
+    // A layout without titles fits only a file in which none were found.
+    if (layout.headerSignature === null && guessed.layout.headerRow !== null) continue;
+    const preview = readBillCsv({ ...file, layout });
+    if (preview.readable && preview.layout.headerSignature === layout.headerSignature) {
+      return { preview, layoutFrom: 'remembered' };
     }
   }
   return { preview: guessed, layoutFrom: 'guessed' };

@@ -200,7 +200,7 @@ export const sheetWords = {
   columns: {
     job: 'Job',
     mix: 'Mix',
-    orderedYards: 'Order yd³',
+    orderedYards: 'yd³',
     ticket: 'Ticket',
     date: 'Date',
     deliveredYards: 'yd³',
@@ -209,10 +209,9 @@ export const sheetWords = {
     quantity: 'Qty',
     rate: 'Rate',
     amount: 'Amount',
-    finding: 'Finding',
+    finding: 'What',
     expected: 'Expected',
     difference: 'Difference',
-    settled: 'Settled',
   },
   noOrder: 'no order',
   noTicket: 'no ticket',
@@ -324,7 +323,6 @@ export const variances = {
   emptySays: 'Every line that was held against a ticket and a rate sheet agrees, or is settled.',
   noneTitle: 'No variance fits these filters',
   noneSays: 'Widen the filters to see more.',
-  bySupplier: 'By supplier',
   columns: {
     finding: 'Finding',
     where: 'Supplier · statement',
