@@ -40,10 +40,18 @@ export async function ticketFacts(scope: Scope, window: SupplierWindow): Promise
         lte(tickets.date, window.to),
       ),
     );
-  return rows.map(({ ticket, jobName }) => ({
+  return rows.map(({ ticket, jobName }) => ticketFactsOf(ticket, jobName));
+}
+
+/** A stored load as the core takes it. */
+export function ticketFactsOf(
+  ticket: typeof tickets.$inferSelect,
+  jobName: string | null,
+): TicketFacts {
+  return {
     id: ticket.id,
     number: ticket.number,
-    supplierId: window.supplierId,
+    supplierId: ticket.supplierId ?? '',
     orderId: ticket.orderId,
     jobId: ticket.jobId,
     jobName,
@@ -59,7 +67,7 @@ export async function ticketFacts(scope: Scope, window: SupplierWindow): Promise
     startedAt: ticket.startedAt,
     finishedAt: ticket.finishedAt,
     leftAt: ticket.leftAt,
-  }));
+  };
 }
 
 export async function pumpTicketFacts(
@@ -78,7 +86,15 @@ export async function pumpTicketFacts(
         lte(pumpTickets.date, window.to),
       ),
     );
-  return rows.map(({ pump, jobName }) => ({
+  return rows.map(({ pump, jobName }) => pumpTicketFactsOf(pump, jobName));
+}
+
+/** A stored day of a pump as the core takes it. */
+export function pumpTicketFactsOf(
+  pump: typeof pumpTickets.$inferSelect,
+  jobName: string | null,
+): PumpTicketFacts {
+  return {
     id: pump.id,
     number: pump.number,
     supplierId: pump.supplierId,
@@ -93,7 +109,7 @@ export async function pumpTicketFacts(
     backInYardAt: pump.backInYardAt,
     pumpedYd3: quantity(pump.pumpedYd3),
     setUps: pump.setUps,
-  }));
+  };
 }
 
 /** How many of the supplier's tickets of these days still wait to be checked. */
@@ -113,23 +129,13 @@ export async function countUnchecked(scope: Scope, window: SupplierWindow): Prom
   return row?.total ?? 0;
 }
 
-export async function orderFacts(
-  scope: Scope,
-  supplierId: string,
-  orderIds: readonly string[],
-): Promise<OrderFacts[]> {
+export async function orderFacts(scope: Scope, orderIds: readonly string[]): Promise<OrderFacts[]> {
   if (orderIds.length === 0) return [];
   const rows = await scope.handle
     .select({ order: orders, jobName: jobs.name, taxable: jobs.taxable })
     .from(orders)
     .innerJoin(jobs, and(eq(jobs.companyId, orders.companyId), eq(jobs.id, orders.jobId)))
-    .where(
-      and(
-        eq(orders.companyId, scope.companyId),
-        eq(orders.supplierId, supplierId),
-        inArray(orders.id, [...orderIds]),
-      ),
-    );
+    .where(and(eq(orders.companyId, scope.companyId), inArray(orders.id, [...orderIds])));
   const lines = await scope.handle
     .select()
     .from(orderLines)
@@ -156,15 +162,21 @@ export async function orderFacts(
   });
 }
 
-/** Every approved sheet of the supplier, whatever its days: rating picks by each delivery's day. */
-export async function rateSheetFacts(scope: Scope, supplierId: string): Promise<RateSheetFacts[]> {
+/**
+ * Every approved sheet of a supplier, or of all (null), whatever its days: rating picks by each
+ * delivery's own day.
+ */
+export async function rateSheetFacts(
+  scope: Scope,
+  supplierId: string | null,
+): Promise<RateSheetFacts[]> {
   const sheets = await scope.handle
     .select()
     .from(rateSheets)
     .where(
       and(
         eq(rateSheets.companyId, scope.companyId),
-        eq(rateSheets.supplierId, supplierId),
+        supplierId === null ? undefined : eq(rateSheets.supplierId, supplierId),
         eq(rateSheets.status, 'approved'),
       ),
     );
@@ -184,7 +196,7 @@ export async function rateSheetFacts(scope: Scope, supplierId: string): Promise<
     .orderBy(asc(rateClauses.position));
   return sheets.map((sheet) => ({
     id: sheet.id,
-    supplierId,
+    supplierId: sheet.supplierId,
     jobId: sheet.jobId,
     name: sheet.name,
     version: sheet.version,

@@ -1,6 +1,5 @@
 import type { QueryClient } from '@tanstack/react-query';
 import { queryOptions } from '@tanstack/react-query';
-import { listDemoFilesOutput } from '../contracts/demo';
 import { importPreview, listImportsOutput } from '../contracts/imports';
 import { candidatesOutput, refreshOutput, sheet } from '../contracts/sheet';
 import { listStatementsOutput } from '../contracts/statements';
@@ -47,20 +46,6 @@ export const variancesQuery = (query: Query) =>
     queryKey: ['variances', query],
     queryFn: () => apiGet('/api/variances', listVariancesOutput, query),
   });
-
-export const demoFilesQuery = () =>
-  queryOptions({
-    queryKey: ['demo', 'files'],
-    queryFn: () => apiGet('/api/demo/files', listDemoFilesOutput),
-    staleTime: Number.POSITIVE_INFINITY,
-  });
-
-/** Fetches a demo file as if it had been chosen from the device. */
-export async function demoFile(name: string): Promise<File> {
-  const answer = await fetch(`/api/demo/files/${encodeURIComponent(name)}`);
-  if (!answer.ok) throw new Error(`The demo file ${name} did not come: ${answer.status}`);
-  return new File([await answer.blob()], name);
-}
 
 /** Has findings kept as today's facts make them: one statement's, or those of all open ones. */
 export async function refreshFindings(queries: QueryClient, statementId?: string): Promise<void> {

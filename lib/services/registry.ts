@@ -64,6 +64,8 @@ import { updateTicket } from './tickets/update-ticket';
 import { exportVariances } from './variances/export-variances';
 import { listVariances } from './variances/list-variances';
 import type { Verb } from './verb';
+import { exportYield } from './yield/export-yield';
+import { listYield } from './yield/list-yield';
 
 /** Every verb there is: the API's description and the generated tests go through this list. */
 export const REGISTRY = [
@@ -133,4 +135,6 @@ export const REGISTRY = [
   exportVariances,
   listDemoFiles,
   getDemoFile,
+  listYield,
+  exportYield,
 ] as unknown as readonly Verb[];

@@ -98,7 +98,7 @@ export async function loadSheetFacts(
     }),
     input: {
       rateSheets: await rateSheetFacts(scope, statement.supplierId),
-      orders: await orderFacts(scope, statement.supplierId, [...orderIds]),
+      orders: await orderFacts(scope, [...orderIds]),
       tickets,
       pumpTickets,
       billLines: storedLines

@@ -3,6 +3,7 @@
 import { useQuery, useQueryClient } from '@tanstack/react-query';
 import Link from 'next/link';
 import { useRouter } from 'next/navigation';
+import { DemoPhotos } from '@/components/tickets/demo-photos';
 import type { Sent } from '@/components/tickets/shots';
 import { takeShot } from '@/components/tickets/shots';
 import { SnapButtons } from '@/components/tickets/snap-buttons';
@@ -48,6 +49,7 @@ export function PlacementScreen({ first }: { first: PourDayPlacement }) {
       <UnsentPhotos onSent={open} />
       <Loads pour={pour} />
       <PumpTickets pour={pour} />
+      {pour.today === pour.pourDate && <DemoPhotos onFile={snap} />}
       <Cautions />
       <div className="sticky bottom-0 z-10 mt-auto border-t border-cured bg-band px-4 pt-3 pb-[max(0.9rem,env(safe-area-inset-bottom))]">
         <SnapButtons snap={words.snap} choose={words.choosePhoto} onFile={snap} />

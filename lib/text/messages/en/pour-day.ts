@@ -19,6 +19,7 @@ export const pourDay = {
   over: (yards: string) => `${yards} over`,
   complete: 'all in',
   loads: 'Loads',
+  demoTitle: 'No ticket at hand? Try one of these demo photos:',
   noLoads: 'No ticket yet. Photograph the first one when its truck arrives.',
   load: (count: number) => `Load ${count}`,
   truck: (truck: string) => `truck ${truck}`,

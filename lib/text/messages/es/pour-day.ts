@@ -21,6 +21,7 @@ export const pourDay: PourDayMessages = {
   over: (yards) => `${yards} de más`,
   complete: 'completo',
   loads: 'Cargas',
+  demoTitle: '¿Sin boleta a la mano? Pruebe con una de estas fotos de demostración:',
   noLoads: 'Aún no hay boletas. Tome la foto de la primera cuando llegue el camión.',
   load: (count) => `Carga ${count}`,
   truck: (truck) => `camión ${truck}`,

@@ -12,7 +12,7 @@ import { Section } from '@/components/ui/section';
 import type { DemoFile } from '@/lib/contracts/demo';
 import { uploadImportOutput } from '@/lib/contracts/imports';
 import { ApiFailure, apiUpload } from '@/lib/queries/api';
-import { demoFile } from '@/lib/queries/statements';
+import { demoFile } from '@/lib/queries/demo';
 import { routes } from '@/lib/routes';
 import { importing as words } from '@/lib/text/messages/en/statements';
 import { failureText } from '@/lib/text/problems';

@@ -1,0 +1,224 @@
+'use client';
+
+import Link from 'next/link';
+import { Fragment, useState } from 'react';
+import type { useListFilter } from '@/components/shell/use-list-filter';
+import { classNames } from '@/components/ui/class-names';
+import { YardsFigure } from '@/components/ui/figures';
+import { RuledTable, Td, Th } from '@/components/ui/ruled-table';
+import { SortHead } from '@/components/ui/sort-head';
+import type { YieldAnswer, YieldFigures, YieldJob } from '@/lib/contracts/yield';
+import { routes } from '@/lib/routes';
+import {
+  dayText,
+  decimalFigure,
+  differenceFigure,
+  moneyFigure,
+  percentFigure,
+  signOf,
+} from '@/lib/text/format';
+import { yieldWords as words } from '@/lib/text/messages/en/yield';
+
+interface YieldTableProps {
+  data: YieldAnswer;
+  filter: ReturnType<typeof useListFilter>;
+}
+
+/** Jobs with their figures; each unfolds into its placements, each leads to its tickets. */
+export function YieldTable({ data, filter }: YieldTableProps) {
+  const [openId, setOpenId] = useState<string | null>(null);
+  const head = { filter, standard: 'overrun' };
+  return (
+    <RuledTable caption={words.list} className="[&_td]:whitespace-nowrap">
+      <thead>
+        <tr>
+          <SortHead sort="job" {...head}>
+            {words.columns.job}
+          </SortHead>
+          <Explained says={words.explain.figured}>{words.columns.figured}</Explained>
+          <Explained says={words.explain.ordered} copy="ordered">
+            {words.columns.ordered}
+          </Explained>
+          <SortHead sort="delivered" align="right" copy="delivered" {...head}>
+            <span title={words.explain.delivered}>{words.columns.delivered}</span>
+          </SortHead>
+          <Explained says={words.explain.billed} copy="billed">
+            {words.columns.billed}
+          </Explained>
+          <SortHead sort="overrun" align="right" {...head}>
+            <span title={words.explain.overrun}>{words.columns.overrun}</span>
+          </SortHead>
+          <Explained says={words.explain.thickness}>{words.columns.thickness}</Explained>
+          <SortHead sort="waiting" align="right" {...head}>
+            <span title={words.explain.waiting}>{words.columns.waiting}</span>
+          </SortHead>
+          <SortHead sort="cost" align="right" {...head}>
+            <span title={words.explain.cost}>{words.columns.cost}</span>
+          </SortHead>
+        </tr>
+      </thead>
+      <tbody>
+        {data.rows.map((row) => (
+          <Fragment key={row.jobId}>
+            <tr className="hover:bg-band">
+              <Td>
+                <JobCell
+                  row={row}
+                  open={row.jobId === openId}
+                  onToggle={() => setOpenId(row.jobId === openId ? null : row.jobId)}
+                />
+              </Td>
+              <Figures of={row} name={row.jobName} />
+            </tr>
+            {row.jobId === openId &&
+              row.placements.map((one) => (
+                <tr key={one.placementId} className="bg-band text-[13.5px]">
+                  <Td>
+                    <span className="block pl-5">
+                      {one.name}
+                      <span className="block text-[12.5px] text-ink-soft">
+                        {dayText(one.pourDate)} · {words.loads(one.loads)} ·{' '}
+                        <Link href={`${routes.tickets()}?placementId=${one.placementId}`}>
+                          {words.tickets}
+                        </Link>
+                      </span>
+                    </span>
+                  </Td>
+                  <Figures of={one} name={one.name} />
+                </tr>
+              ))}
+          </Fragment>
+        ))}
+      </tbody>
+      <tfoot>
+        <tr>
+          <Td>{words.total}</Td>
+          <Figures of={data.totals} name={words.total} />
+        </tr>
+      </tfoot>
+    </RuledTable>
+  );
+}
+
+interface ExplainedProps {
+  says: string;
+  copy?: 'ordered' | 'billed';
+  children: string;
+}
+
+function Explained({ says, copy, children }: ExplainedProps) {
+  return (
+    <Th align="right" title={says} {...(copy ? { copy } : {})}>
+      {children}
+    </Th>
+  );
+}
+
+interface JobCellProps {
+  row: YieldJob;
+  open: boolean;
+  onToggle: () => void;
+}
+
+function JobCell({ row, open, onToggle }: JobCellProps) {
+  return (
+    <>
+      <button
+        type="button"
+        aria-expanded={open}
+        onClick={onToggle}
+        className="inline-flex min-h-9 items-baseline gap-1.5 text-left font-semibold text-carbon"
+      >
+        <span aria-hidden>{open ? '▾' : '▸'}</span>
+        {row.jobName}
+      </button>
+      <span className="block pl-5 text-[12.5px] text-ink-soft">
+        {row.jobNumber} · {words.loads(row.loads)} ·{' '}
+        <Link href={`${routes.tickets()}?jobId=${row.jobId}`}>{words.tickets}</Link>
+        {row.smallSample && <span title={words.smallSays}> · {words.small}</span>}
+      </span>
+    </>
+  );
+}
+
+function Figures({ of: row, name }: { of: YieldFigures; name: string }) {
+  return (
+    <>
+      <Td align="right">
+        <YardsFigure value={row.figuredYd3} unit={false} />
+      </Td>
+      <Td align="right" copy="ordered">
+        <YardsFigure value={row.orderedYd3} unit={false} />
+      </Td>
+      <Td align="right" copy="delivered">
+        <YardsFigure value={row.deliveredYd3} unit={false} />
+        {signOf(row.returnedYd3) !== 'zero' && (
+          <Small>{words.returned(decimalFigure(row.returnedYd3))}</Small>
+        )}
+      </Td>
+      <Td align="right" copy="billed">
+        <YardsFigure value={row.billedYd3} unit={false} />
+      </Td>
+      <Td align="right">
+        <Overrun row={row} />
+      </Td>
+      <Td align="right">
+        {row.impliedThicknessIn === null ? '–' : decimalFigure(row.impliedThicknessIn)}
+        {row.plannedThicknessIn !== null && (
+          <Small>{words.planned(decimalFigure(row.plannedThicknessIn))}</Small>
+        )}
+      </Td>
+      <Td align="right">
+        {row.minutesPerLoad === null
+          ? '–'
+          : words.minutesPerLoad(decimalFigure(row.minutesPerLoad, 0))}
+        {row.minutesPerYd3 !== null && (
+          <Small>{words.minutesPerYard(decimalFigure(row.minutesPerYd3, 1))}</Small>
+        )}
+      </Td>
+      <Td align="right">
+        <Cost row={row} name={name} />
+      </Td>
+    </>
+  );
+}
+
+function Small({ children }: { children: string }) {
+  return <span className="block text-[12.5px] text-ink-soft">{children}</span>;
+}
+
+function Overrun({ row }: { row: YieldFigures }) {
+  if (row.overrunShare === null || row.overrunYd3 === null) return '–';
+  const over = signOf(row.overrunYd3) === 'positive';
+  return (
+    <span className={classNames(over && 'font-semibold text-keel')}>
+      {over && '+'}
+      {percentFigure(row.overrunShare, 1)}
+      <Small>{`${differenceFigure(row.overrunYd3)} yd³`}</Small>
+    </span>
+  );
+}
+
+/** The cost a yard; what it is made of unfolds. */
+function Cost({ row, name }: { row: YieldFigures; name: string }) {
+  if (row.costPerYd3 === null) return '–';
+  return (
+    <details>
+      <summary aria-label={words.costOf(name)} className="list-none">
+        <span className="font-semibold">{moneyFigure(row.costPerYd3)}</span>{' '}
+        <span className="text-ink-soft">{words.columns.perYard} ▾</span>
+        {row.costFrom !== 'billed' && <Small>{words.sources[row.costFrom]}</Small>}
+      </summary>
+      <dl className="mt-1 grid grid-cols-[1fr_auto] gap-x-4 border-t border-wet pt-1 text-[13px] font-normal">
+        {row.costParts.map(({ part, perYd3, amount }) => (
+          <div key={part} className="contents">
+            <dt className="text-left text-ink-soft">{words.parts[part]}</dt>
+            <dd>{perYd3 === null ? moneyFigure(amount) : moneyFigure(perYd3)}</dd>
+          </div>
+        ))}
+        <dt className="text-left font-semibold">{words.total}</dt>
+        <dd className="font-semibold">{moneyFigure(row.cost)}</dd>
+      </dl>
+    </details>
+  );
+}
