@@ -1,8 +1,22 @@
-import { and, asc, count, eq, exists, ilike, inArray, or, type SQL } from 'drizzle-orm';
+import {
+  and,
+  asc,
+  count,
+  eq,
+  exists,
+  getTableColumns,
+  ilike,
+  inArray,
+  or,
+  type SQL,
+  sql,
+} from 'drizzle-orm';
 import type { JobRow } from '../../lib/contracts/jobs';
 import { newId } from '../../lib/ids';
-import { jobCrew, jobs } from '../schema/jobs';
+import { jobCrew, jobs, placements } from '../schema/jobs';
+import { orderLines, orders } from '../schema/orders';
 import { people } from '../schema/people';
+import { tickets } from '../schema/tickets';
 import type { Scope } from '../tx';
 
 export interface JobFilter {
@@ -11,6 +25,21 @@ export interface JobFilter {
   /** Only jobs in this person's crew; null for all of the company's. */
   readonly crewMemberId: string | null;
 }
+
+// The table is named outright: a select from one table leaves columns' tables out.
+const ROW = {
+  ...getTableColumns(jobs),
+  figuredYd3: sql<string | null>`(select sum(p.figured_yd3)::numeric(14,2)::text
+    from ${placements} p where p.company_id = jobs.company_id and p.job_id = jobs.id
+    and p.status <> 'cancelled')`,
+  orderedYd3: sql<string | null>`(select sum(l.quantity)::numeric(14,2)::text
+    from ${orders} o join ${orderLines} l on l.company_id = o.company_id and l.order_id = o.id
+    where o.company_id = jobs.company_id and o.job_id = jobs.id
+    and o.status <> 'cancelled' and l.unit = 'yd³')`,
+  deliveredYd3: sql<string>`(select coalesce(sum(t.quantity_yd3), 0)::numeric(14,2)::text
+    from ${tickets} t where t.company_id = jobs.company_id and t.job_id = jobs.id
+    and t.status <> 'rejected')`,
+};
 
 /** `search` as a pattern that matches it literally anywhere. */
 export function containing(search: string): string {
@@ -49,7 +78,7 @@ export async function listJobs(
   const where = matching(scope, filter);
   const [counted] = await scope.handle.select({ total: count() }).from(jobs).where(where);
   const rows = await scope.handle
-    .select()
+    .select(ROW)
     .from(jobs)
     .where(where)
     .orderBy(asc(jobs.number), asc(jobs.id))
@@ -71,7 +100,7 @@ export async function findJob(
   crewMemberId: string | null,
 ): Promise<JobRow | null> {
   const [row] = await scope.handle
-    .select()
+    .select(ROW)
     .from(jobs)
     .where(and(matching(scope, { status: 'all', search: '', crewMemberId }), eq(jobs.id, jobId)));
   if (!row) return null;
@@ -97,7 +126,7 @@ async function crewOf(scope: Scope, jobIds: string[]): Promise<Map<string, JobRo
   return crews;
 }
 
-export type JobValues = Omit<JobRow, 'id' | 'crew'>;
+export type JobValues = Omit<JobRow, 'id' | 'crew' | 'figuredYd3' | 'orderedYd3' | 'deliveredYd3'>;
 
 export async function insertJob(scope: Scope, id: string, values: JobValues): Promise<void> {
   await scope.handle.insert(jobs).values({ ...values, id, companyId: scope.companyId });

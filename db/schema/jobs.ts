@@ -9,6 +9,7 @@ import {
   unique,
   uuid,
 } from 'drizzle-orm/pg-core';
+import { ELEMENTS } from '../../lib/domain/elements';
 import { companyRecord, quantity } from './columns';
 import { companies } from './companies';
 import { people } from './people';
@@ -52,18 +53,6 @@ export const jobCrew = pgTable(
     }),
   ],
 );
-
-export const ELEMENTS = [
-  'slab',
-  'footing',
-  'wall',
-  'pier',
-  'column',
-  'steps',
-  'curb',
-  'deck',
-  'other',
-] as const;
 
 /** One pour of one element. */
 export const placements = pgTable(

@@ -18,6 +18,12 @@ export const jobRow = z.object({
   status: z.enum(['open', 'finished']),
   taxable: z.boolean(),
   crew: z.array(z.object({ id: uuid, name: z.string() })),
+  /** Of its placements that were not called off; null where there is none. */
+  figuredYd3: z.string().nullable(),
+  /** On its orders that were not cancelled; null where nothing was ordered. */
+  orderedYd3: z.string().nullable(),
+  /** On its tickets that were not set aside. */
+  deliveredYd3: z.string(),
 });
 export type JobRow = z.infer<typeof jobRow>;
 

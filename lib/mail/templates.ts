@@ -94,3 +94,27 @@ export function orderMail(facts: {
     ),
   };
 }
+
+/** Tells dispatch that an order they were sent is off. */
+export function cancelledOrderMail(facts: {
+  readonly companyName: string;
+  readonly orderNumber: string;
+  readonly supplierName: string;
+  readonly jobName: string;
+  readonly pourDay: string;
+  readonly reason: string;
+  readonly cancelledBy: string;
+  readonly answerTo: string;
+}): MailText {
+  return {
+    kind: 'order',
+    subject: `Cancelled: order ${facts.orderNumber} for ${facts.pourDay}, ${facts.companyName}`,
+    text: paragraphs(
+      `To ${facts.supplierName}, dispatch`,
+      `Please cancel our order ${facts.orderNumber} for ${facts.jobName} on ${facts.pourDay}.`,
+      `Reason: ${facts.reason}`,
+      `Questions to ${facts.answerTo}.`,
+      `${facts.cancelledBy}\n${facts.companyName}`,
+    ),
+  };
+}

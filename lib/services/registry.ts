@@ -20,6 +20,14 @@ import { updateJob } from './jobs/update-job';
 import { issueKey } from './keys/issue-key';
 import { listKeys } from './keys/list-keys';
 import { revokeKey } from './keys/revoke-key';
+import { cancelOrder } from './orders/cancel-order';
+import { confirmOrder } from './orders/confirm-order';
+import { createOrder } from './orders/create-order';
+import { exportOrders } from './orders/export-orders';
+import { getOrder } from './orders/get-order';
+import { listOrders } from './orders/list-orders';
+import { sendOrder } from './orders/send-order';
+import { updateOrder } from './orders/update-order';
 import { getMail } from './outbox/get-mail';
 import { listOutbox } from './outbox/list-outbox';
 import { changeRole } from './people/change-role';
@@ -30,6 +38,10 @@ import { withdrawInvitation } from './people/withdraw-invitation';
 import { getPhoto } from './photos/get-photo';
 import { getReading } from './photos/get-reading';
 import { uploadPhoto } from './photos/upload-photo';
+import { createPlacement } from './placements/create-placement';
+import { getPlacement } from './placements/get-placement';
+import { listPlacements } from './placements/list-placements';
+import { updatePlacement } from './placements/update-placement';
 import { getPourDay } from './pour-day/get-pour-day';
 import { getPourDayPlacement } from './pour-day/get-pour-day-placement';
 import { createPumpTicket } from './pump-tickets/create-pump-ticket';
@@ -137,4 +149,16 @@ export const REGISTRY = [
   getDemoFile,
   listYield,
   exportYield,
+  listPlacements,
+  getPlacement,
+  createPlacement,
+  updatePlacement,
+  listOrders,
+  exportOrders,
+  getOrder,
+  createOrder,
+  updateOrder,
+  sendOrder,
+  confirmOrder,
+  cancelOrder,
 ] as unknown as readonly Verb[];

@@ -1,0 +1,13 @@
+/** What a placement pours. */
+export const ELEMENTS = [
+  'slab',
+  'footing',
+  'wall',
+  'pier',
+  'column',
+  'steps',
+  'curb',
+  'deck',
+  'other',
+] as const;
+export type Element = (typeof ELEMENTS)[number];
