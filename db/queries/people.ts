@@ -160,3 +160,12 @@ export async function withdrawInvitation(
     .returning({ email: invitations.email, name: invitations.name, role: invitations.role });
   return row ?? null;
 }
+
+/** The foremen who work in the company now: who can be put on a job. */
+export async function foremenOf(scope: Scope): Promise<{ id: string; name: string }[]> {
+  return scope.handle
+    .select({ id: people.id, name: people.name })
+    .from(people)
+    .where(and(present(scope), eq(people.role, 'foreman')))
+    .orderBy(asc(people.name), asc(people.id));
+}

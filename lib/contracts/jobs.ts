@@ -43,3 +43,8 @@ export const updateJobInput = z.strictObject({
   status: z.enum(['open', 'finished']),
   crewIds: z.array(uuid),
 });
+
+export const jobChoicesInput = z.strictObject({});
+export const jobChoicesOutput = z.object({
+  foremen: z.array(z.object({ id: uuid, name: z.string() })),
+});

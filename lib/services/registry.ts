@@ -15,6 +15,7 @@ import { setImportLayout } from './imports/set-import-layout';
 import { uploadImport } from './imports/upload-import';
 import { createJob } from './jobs/create-job';
 import { getJob } from './jobs/get-job';
+import { jobChoices } from './jobs/job-choices';
 import { listJobs } from './jobs/list-jobs';
 import { updateJob } from './jobs/update-job';
 import { issueKey } from './keys/issue-key';
@@ -90,6 +91,7 @@ export const REGISTRY = [
   getCompany,
   updateCompany,
   createJob,
+  jobChoices,
   getJob,
   listJobs,
   updateJob,
