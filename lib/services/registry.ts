@@ -49,6 +49,11 @@ import { createPumpTicket } from './pump-tickets/create-pump-ticket';
 import { getPumpTicket } from './pump-tickets/get-pump-ticket';
 import { listPumpTickets } from './pump-tickets/list-pump-tickets';
 import { updatePumpTicket } from './pump-tickets/update-pump-ticket';
+import { approveRateSheet } from './rate-sheets/approve-rate-sheet';
+import { createRateSheet } from './rate-sheets/create-rate-sheet';
+import { deleteRateSheet } from './rate-sheets/delete-rate-sheet';
+import { getRateSheet } from './rate-sheets/get-rate-sheet';
+import { updateRateSheet } from './rate-sheets/update-rate-sheet';
 import { acceptRows } from './statements/accept-rows';
 import { claimRows } from './statements/claim-rows';
 import { closeStatement } from './statements/close-statement';
@@ -64,6 +69,11 @@ import { strikeRows } from './statements/strike-rows';
 import { undoLast } from './statements/undo';
 import { unmatchLine } from './statements/unmatch-line';
 import { unstrikeRows } from './statements/unstrike-rows';
+import { createSupplier } from './suppliers/create-supplier';
+import { exportSuppliers } from './suppliers/export-suppliers';
+import { getSupplier } from './suppliers/get-supplier';
+import { listSuppliers } from './suppliers/list-suppliers';
+import { updateSupplier } from './suppliers/update-supplier';
 import { attachTicket } from './tickets/attach-ticket';
 import { confirmTicket } from './tickets/confirm-ticket';
 import { createTicket } from './tickets/create-ticket';
@@ -163,4 +173,14 @@ export const REGISTRY = [
   sendOrder,
   confirmOrder,
   cancelOrder,
+  listSuppliers,
+  exportSuppliers,
+  getSupplier,
+  createSupplier,
+  updateSupplier,
+  getRateSheet,
+  createRateSheet,
+  updateRateSheet,
+  approveRateSheet,
+  deleteRateSheet,
 ] as unknown as readonly Verb[];
