@@ -8,7 +8,7 @@ import { decimalFigure, differenceFigure, moneyFigure } from '@/lib/text/format'
 import { sheetWords as words } from '@/lib/text/messages/en/statements';
 import { varianceKinds } from '@/lib/text/messages/en/variance-kinds';
 import { Moment } from '../ui/where';
-import { findingText } from './sheet-columns';
+import { findingText } from './finding-text';
 import { TicketEvidence } from './ticket-evidence';
 
 interface EvidencePanelProps {

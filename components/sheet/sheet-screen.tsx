@@ -17,7 +17,6 @@ import { Key, KeysDialog } from './keys-dialog';
 import { MatchDialog } from './match-dialog';
 import { RowActions } from './row-actions';
 import { SheetBand } from './sheet-band';
-import { SHEET_COLUMNS } from './sheet-columns';
 import { SheetHead } from './sheet-head';
 import { SheetSlips } from './sheet-slips';
 import { SheetTools } from './sheet-tools';
@@ -186,7 +185,6 @@ export function SheetScreen({ first, me, mayReopen, startKey }: SheetScreenProps
             <LedgerGrid
               label={`${words.kind} ${sheet.statement.supplierName}`}
               rows={rows}
-              columns={SHEET_COLUMNS}
               selectedKey={chosenKey}
               onSelect={setChosenKey}
               onOrder={keepOrder}

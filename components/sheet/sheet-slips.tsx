@@ -7,7 +7,7 @@ import { sheetWords as words } from '@/lib/text/messages/en/statements';
 import { classNames } from '../ui/class-names';
 import { CopyTag } from '../ui/copy-tag';
 import { Difference } from '../ui/figures';
-import { findingText } from './sheet-columns';
+import { findingText } from './finding-text';
 
 interface SheetSlipsProps {
   rows: readonly SheetRow[];

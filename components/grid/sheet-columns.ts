@@ -9,7 +9,7 @@ import {
   yardsFigure,
 } from '@/lib/text/format';
 import { sheetWords as words } from '@/lib/text/messages/en/statements';
-import { varianceKinds } from '@/lib/text/messages/en/variance-kinds';
+import { findingText } from '../sheet/finding-text';
 
 type Column = ColDef<SheetRow>;
 
@@ -72,14 +72,6 @@ function lineText(row: SheetRow): string {
   return row.deliveries.length === 0 && ticketNumber
     ? `${description} ${ticketNumber}`
     : description;
-}
-
-/** "Yards differ", "agrees": the finding's name, or that there is none. */
-export function findingText(row: SheetRow): string {
-  if (row.kind === 'credit') return words.credit;
-  if (row.kind === 'payment') return words.payment;
-  if (row.findings.length === 0) return words.verdicts[row.verdict];
-  return row.findings.map((finding) => varianceKinds[finding.kind]).join(', ');
 }
 
 /** The finding with what was decided about it, where that is more than a stroke. */
