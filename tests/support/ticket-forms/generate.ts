@@ -29,9 +29,9 @@ function shots(
   return tickets.map((ticket, index) => ({ form, ticket, faults: faults[index] ?? {} }));
 }
 
-/** A wet thumb over the yards of the load: the middle digits run. */
+/** A wet thumb over the yards of the load: its digits have run and nobody can be sure of them. */
 const WET_THUMB =
-  'width:56px; height:44px; border-radius:50%; background:rgba(70,66,72,.72); filter:blur(7px)';
+  'width:96px; height:50px; border-radius:50%; background:rgba(58,54,60,.9); filter:blur(6px)';
 
 function allShots(): Shot[] {
   const larkspur = larkspurTickets();
