@@ -13,6 +13,7 @@ export interface PouredPlacement {
   readonly jobNumber: string;
   readonly jobName: string;
   readonly name: string;
+  readonly status: 'planned' | 'poured' | 'cancelled';
   readonly pourDate: string;
   readonly figuredYd3: string;
   readonly areaFt2: string | null;
@@ -35,6 +36,7 @@ export async function placementsBetween(
       jobNumber: jobs.number,
       jobName: jobs.name,
       name: placements.name,
+      status: placements.status,
       pourDate: placements.pourDate,
       figuredYd3: placements.figuredYd3,
       areaFt2: placements.areaFt2,

@@ -1,5 +1,6 @@
 import type { z } from 'zod';
 import { jobChoices } from '../../../db/queries/yield';
+import { dayIn } from '../../clock';
 import {
   type listYieldInput as Filter,
   listYieldInput,
@@ -14,9 +15,13 @@ import { defineVerb } from '../verb';
 import { yieldFigures } from './figures';
 import { type PlacedFacts, placedFacts } from './work-out';
 
-/** A job of its placements; those without a delivery yet say nothing about yield. */
-function jobRow(placed: readonly PlacedFacts[]): YieldJob | null {
-  const poured = placed.filter((one) => one.facts.tickets.length > 0);
+/** A pour that is still running, or has no delivery, says nothing about yield yet. */
+function isOver({ placement, facts }: PlacedFacts, today: string): boolean {
+  const over = placement.status === 'poured' || placement.pourDate < today;
+  return over && facts.tickets.length > 0;
+}
+
+function jobRow(poured: readonly PlacedFacts[]): YieldJob | null {
   const [first] = poured;
   if (!first) return null;
   const { jobId, jobNumber, jobName } = first.placement;
@@ -58,10 +63,11 @@ function sorted(rows: readonly YieldJob[], { sort, direction }: z.output<typeof 
 }
 
 export async function workOutYield(
-  { scope }: Pick<Ctx, 'scope'>,
+  { scope, clock, company }: Pick<Ctx, 'scope' | 'clock' | 'company'>,
   filter: z.output<typeof Filter>,
 ): Promise<YieldAnswer> {
-  const placed = await placedFacts(scope, filter);
+  const today = dayIn(company.timeZone, clock.now());
+  const placed = (await placedFacts(scope, filter)).filter((one) => isOver(one, today));
   const byJob = new Map<string, PlacedFacts[]>();
   for (const one of placed) {
     const group = byJob.get(one.placement.jobId) ?? [];
@@ -73,7 +79,7 @@ export async function workOutYield(
       [...byJob.values()].flatMap((group) => jobRow(group) ?? []),
       filter,
     ),
-    totals: yieldFigures(placed.filter((one) => one.facts.tickets.length > 0)),
+    totals: yieldFigures(placed),
     jobs: await jobChoices(scope),
   };
 }

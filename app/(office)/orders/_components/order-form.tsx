@@ -98,7 +98,7 @@ function Lines({ state }: { state: FormState<Form, OrderValues> }) {
   const { fields, append, remove } = useFieldArray({ control: state.form.control, name: 'lines' });
   return (
     <fieldset className="grid gap-3 border-y border-wet py-4">
-      <legend className="font-head text-lg font-semibold">{words.lines}</legend>
+      <legend className="pr-3 font-head text-lg font-semibold">{words.lines}</legend>
       {fields.map((line, index) => (
         <fieldset
           key={line.id}

@@ -20,7 +20,7 @@ export function OrderSheet({ order }: { order: OrderDetail }) {
   return (
     <WhereProvider where={times}>
       <DocumentHead
-        kind={words.to_}
+        kind={words.orderTo}
         title={order.supplierName}
         facts={[
           {

@@ -87,12 +87,15 @@ function Row({ row }: { row: VarianceRow }) {
         )}
       </Td>
       <Td align="right">
+        <OnSlip>{words.columns.expected}</OnSlip>
         <MoneyFigure value={row.expected} />
       </Td>
       <Td align="right" copy="billed">
+        <OnSlip>{words.columns.billed}</OnSlip>
         <MoneyFigure value={row.billed} />
       </Td>
       <Td align="right">
+        <OnSlip>{words.columns.difference}</OnSlip>
         <Difference value={row.difference} />
       </Td>
       <Td align="right" className="whitespace-nowrap">
@@ -104,4 +107,9 @@ function Row({ row }: { row: VarianceRow }) {
       </Td>
     </tr>
   );
+}
+
+/** On a phone the column's word stands before its figure. */
+function OnSlip({ children }: { children: string }) {
+  return <span className="text-ink-soft md:hidden">{children} </span>;
 }

@@ -2,7 +2,7 @@
 export const yieldWords = {
   title: 'Yield',
   kind: 'Where the yards went',
-  says: 'Only placements that have been poured count. Delivered yards are those of checked tickets.',
+  says: 'Only pours that are over count. Delivered yards are those of checked tickets.',
   from: 'Poured from',
   to: 'to',
   job: 'Job',
