@@ -1,8 +1,9 @@
-import { and, asc, eq, gte, inArray, lte, or, sql } from 'drizzle-orm';
+import { and, asc, eq, gte, inArray, lte, or, type SQL, sql } from 'drizzle-orm';
 import type { ChargeKind, PumpTicketFacts, TicketFacts } from '../../lib/domain/facts';
 import { jobs, placements } from '../schema/jobs';
 import { orderLines, orders } from '../schema/orders';
 import { billLines, matches } from '../schema/statements';
+import { suppliers } from '../schema/suppliers';
 import { pumpTickets, tickets } from '../schema/tickets';
 import type { Scope } from '../tx';
 import { pumpTicketFactsOf, ticketFactsOf } from './sheet-facts';
@@ -27,6 +28,7 @@ export async function placementsBetween(
     readonly from?: string | undefined;
     readonly to?: string | undefined;
     readonly jobId?: string | undefined;
+    readonly supplierId?: string | undefined;
   },
 ): Promise<PouredPlacement[]> {
   return scope.handle
@@ -51,9 +53,22 @@ export async function placementsBetween(
         filter.from ? gte(placements.pourDate, filter.from) : undefined,
         filter.to ? lte(placements.pourDate, filter.to) : undefined,
         filter.jobId ? eq(placements.jobId, filter.jobId) : undefined,
+        filter.supplierId ? deliveredBy(filter.supplierId) : undefined,
       ),
     )
     .orderBy(asc(jobs.number), asc(placements.pourDate), asc(placements.id));
+}
+
+/** Whether the supplier brought the placement concrete or a pump. */
+function deliveredBy(supplierId: string): SQL {
+  return sql`(exists (
+      select 1 from ${tickets} load
+      where load.company_id = ${placements.companyId} and load.placement_id = ${placements.id}
+      and load.supplier_id = ${supplierId} and load.status = 'confirmed')
+    or exists (
+      select 1 from ${pumpTickets} pump
+      where pump.company_id = ${placements.companyId} and pump.placement_id = ${placements.id}
+      and pump.supplier_id = ${supplierId}))`;
 }
 
 type Placed<Facts> = { readonly placementId: string; readonly facts: Facts };
@@ -222,4 +237,14 @@ export async function jobChoices(
     .from(jobs)
     .where(eq(jobs.companyId, scope.companyId))
     .orderBy(asc(jobs.number));
+}
+
+export async function supplierChoices(scope: Scope): Promise<{ id: string; name: string }[]> {
+  return scope.handle
+    .select({ id: suppliers.id, name: suppliers.name })
+    .from(suppliers)
+    .where(
+      and(eq(suppliers.companyId, scope.companyId), inArray(suppliers.kind, ['readyMix', 'pump'])),
+    )
+    .orderBy(asc(suppliers.name));
 }

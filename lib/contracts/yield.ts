@@ -9,6 +9,8 @@ const filters = {
   from: plainDate.optional(),
   to: plainDate.optional(),
   jobId: uuid.optional(),
+  /** Only placements that this supplier brought concrete or a pump to, with all of their figures. */
+  supplierId: uuid.optional(),
   sort: z.enum(YIELD_SORTS).default('overrun'),
   direction: z.enum(['up', 'down']).default('down'),
 };
@@ -18,7 +20,7 @@ const figure = z.string().nullable();
 
 /**
  * Where the cost comes from: bills, the rate sheets where nothing is billed yet, or both; `none`
- * where there is no delivery.
+ * where neither says anything.
  */
 export const COST_SOURCES = ['billed', 'expected', 'both', 'none'] as const;
 
@@ -46,6 +48,8 @@ const figures = {
     z.object({ part: z.enum(COST_PARTS), amount: z.string(), perYd3: z.string().nullable() }),
   ),
   costFrom: z.enum(COST_SOURCES),
+  /** Loads and pump tickets neither billed nor on a rate sheet: the cost is without them. */
+  unpriced: z.number().int(),
   /** Too few loads to read anything into. */
   smallSample: z.boolean(),
 };
@@ -73,5 +77,7 @@ export const listYieldOutput = z.object({
   rows: z.array(yieldJob),
   totals: yieldFigures,
   jobs: z.array(z.object({ id: uuid, number: z.string(), name: z.string() })),
+  /** Those who deliver concrete or pump it. */
+  suppliers: z.array(z.object({ id: uuid, name: z.string() })),
 });
 export type YieldAnswer = z.infer<typeof listYieldOutput>;

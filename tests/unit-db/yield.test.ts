@@ -69,6 +69,34 @@ describe('yield', () => {
     });
   });
 
+  it('gives each job the yards, loads and minutes that its records add up to', async () => {
+    const answered = await store.handle.execute(sql`
+      with over as (
+        select p.id, p.job_id, p.figured_yd3 from placements p
+        where p.company_id = ${companyId} and p.status <> 'cancelled'
+          and (p.status = 'poured' or p.pour_date < '2026-12-01')
+          and exists (select 1 from tickets t where t.placement_id = p.id and t.status = 'confirmed'))
+      select j.number as "jobNumber",
+        (select sum(o.figured_yd3)::text from over o where o.job_id = j.id) as "figuredYd3",
+        count(*)::int as loads, sum(t.quantity_yd3)::text as "deliveredYd3",
+        coalesce(sum(t.returned_yd3), 0)::numeric(14,2)::text as "returnedYd3",
+        coalesce(sum(coalesce(t.finished_at, t.left_at) - t.arrived_at), 0)::int as "onSiteMinutes",
+        count(coalesce(t.finished_at, t.left_at) - t.arrived_at)::int as "timedLoads",
+        (select sum(l.quantity)::text from order_lines l join orders d on d.id = l.order_id
+          where d.placement_id in (select o.id from over o where o.job_id = j.id)
+          and d.status <> 'cancelled' and l.unit = 'yd³') as "orderedYd3"
+      from jobs j join over on over.job_id = j.id
+        join tickets t on t.placement_id = over.id and t.status = 'confirmed'
+      group by j.id, j.number order by j.number`);
+    const { rows } = answered as unknown as { rows: Record<string, string | number | null>[] };
+    expect(rows.length).toBeGreaterThan(5);
+    const answer = await ask({ sort: 'job', direction: 'up' });
+    const shown = answer.rows.map((row) =>
+      Object.fromEntries(Object.keys(rows[0] ?? {}).map((key) => [key, row[key as 'loads']])),
+    );
+    expect(shown).toEqual(rows);
+  });
+
   it('leaves a pour out that is still to come or running', async () => {
     const { rows } = await ask({});
     const names = rows.flatMap((row) => row.placements.map((one) => one.name));

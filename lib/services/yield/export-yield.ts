@@ -33,6 +33,7 @@ const COLUMNS: readonly CsvColumn<ExportRow>[] = [
   ['Cost', (row) => row.cost],
   ['Cost per yd3', (row) => row.costPerYd3],
   ['Cost from', (row) => row.costFrom],
+  ['Deliveries without a price', (row) => row.unpriced],
 ];
 
 export const exportYield = defineVerb({

@@ -33,6 +33,7 @@ function sourceOf(placed: readonly PlacedFacts[]): YieldFigures['costFrom'] {
 export function yieldFigures(placed: readonly PlacedFacts[]): YieldFigures {
   const sum = summarizeYield(placed.map((one) => one.facts));
   const { figuredYd3, deliveredYd3, returnedYd3 } = sum;
+  const costFrom = sourceOf(placed);
   const over =
     figuredYd3 && sum.loads > 0
       ? quantity(deliveredYd3.minus(returnedYd3).minus(figuredYd3))
@@ -53,13 +54,14 @@ export function yieldFigures(placed: readonly PlacedFacts[]): YieldFigures {
     minutesPerLoad: text(sum.minutesPerLoad),
     minutesPerYd3: text(sum.minutesPerYd3),
     cost: moneyText(sum.cost),
-    costPerYd3: sum.costPerYd3 === null ? null : moneyText(sum.costPerYd3),
+    costPerYd3: costFrom === 'none' || sum.costPerYd3 === null ? null : moneyText(sum.costPerYd3),
     costParts: sum.costParts.map(({ part, amount, perYd3 }) => ({
       part,
       amount: moneyText(amount),
       perYd3: perYd3 === null ? null : moneyText(perYd3),
     })),
-    costFrom: sourceOf(placed),
+    costFrom,
+    unpriced: placed.reduce((count, one) => count + one.unpriced, 0),
     smallSample: sum.smallSample,
   };
 }

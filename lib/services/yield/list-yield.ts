@@ -1,5 +1,5 @@
 import type { z } from 'zod';
-import { jobChoices } from '../../../db/queries/yield';
+import { jobChoices, supplierChoices } from '../../../db/queries/yield';
 import { dayIn } from '../../clock';
 import {
   type listYieldInput as Filter,
@@ -81,6 +81,7 @@ export async function workOutYield(
     ),
     totals: yieldFigures(placed),
     jobs: await jobChoices(scope),
+    suppliers: await supplierChoices(scope),
   };
 }
 

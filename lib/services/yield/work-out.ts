@@ -23,6 +23,8 @@ export interface PlacedFacts {
   readonly placement: PouredPlacement;
   readonly facts: PlacementFacts;
   readonly costFrom: YieldFigures['costFrom'];
+  /** Deliveries that nobody has billed and no rate sheet covers. */
+  readonly unpriced: number;
 }
 
 function grouped<Row>(rows: readonly Row[], keyOf: (row: Row) => string): Map<string, Row[]> {
@@ -57,29 +59,63 @@ async function billedShares(scope: Scope, ties: readonly BilledTie[]): Promise<C
   return spreadCharges(lines, new Map(invoices));
 }
 
-/** What the rate sheets say of deliveries that nobody has billed yet. */
+/** What the bills have of each delivery so far. */
+interface BilledSoFar {
+  /** Its concrete or its pump time is billed: nothing more is expected of it. */
+  has(deliveryId: string): boolean;
+  hasKind(deliveryId: string, kind: ChargeKind): boolean;
+}
+
+function billedSoFar(ties: readonly BilledTie[]): BilledSoFar {
+  const main = new Set(
+    ties.filter((tie) => isMainCharge(tie.chargeKind)).map((tie) => tie.deliveryId),
+  );
+  const kinds = new Set(ties.map((tie) => `${tie.deliveryId} ${tie.chargeKind}`));
+  return {
+    has: (deliveryId) => main.has(deliveryId),
+    hasKind: (deliveryId, kind) => kinds.has(`${deliveryId} ${kind}`),
+  };
+}
+
+interface Expected {
+  readonly shares: readonly ChargeShare[];
+  readonly unpriced: ReadonlySet<string>;
+}
+
+/**
+ * What the rate sheets say of deliveries that nobody has billed yet. All are rated, the billed
+ * ones too, since an order's loads tell which of them was the balance load; and each is taxed by
+ * itself, so that what one job is expected to cost does not hang on what else is asked for.
+ */
 async function expectedShares(
   scope: Scope,
   tickets: readonly TicketFacts[],
   pumpTickets: readonly PumpTicketFacts[],
-): Promise<ChargeShare[]> {
-  if (tickets.length + pumpTickets.length === 0) return [];
-  const orderIds = new Set([...tickets, ...pumpTickets].flatMap((one) => one.orderId ?? []));
-  const { lines } = expectedBill({
+  billed: BilledSoFar,
+): Promise<Expected> {
+  const deliveries = [...tickets, ...pumpTickets];
+  if (deliveries.every(({ id }) => billed.has(id))) return { shares: [], unpriced: new Set() };
+  const orderIds = new Set(deliveries.flatMap((one) => one.orderId ?? []));
+  const { lines, unrated } = expectedBill({
     rateSheets: await rateSheetFacts(scope, null),
     orders: await orderFacts(scope, [...orderIds]),
     tickets,
     pumpTickets,
+    invoiceOf: new Map(deliveries.map(({ id }) => [id, id])),
   });
-  return lines.flatMap((line): ChargeShare[] => {
-    const deliveryIds = [...line.ticketIds, ...line.pumpTicketIds];
-    const amount = line.status === 'owed' ? line.amount : line.lowest;
-    return deliveryIds.map((deliveryId) => ({
-      deliveryId,
-      chargeKind: line.chargeKind,
-      amount: money(amount.dividedBy(deliveryIds.length)),
-    }));
-  });
+  const shares = lines.flatMap((line): ChargeShare[] =>
+    [...line.ticketIds, ...line.pumpTicketIds]
+      .filter((id) => !billed.has(id) && !billed.hasKind(id, line.chargeKind))
+      .map((deliveryId) => ({
+        deliveryId,
+        chargeKind: line.chargeKind,
+        amount: line.status === 'owed' ? line.amount : line.lowest,
+      })),
+  );
+  const unpriced = unrated
+    .flatMap((one) => one.ticketId ?? one.pumpTicketId ?? [])
+    .filter((id) => !billed.has(id));
+  return { shares, unpriced: new Set(unpriced) };
 }
 
 /** Yards that concrete lines charge for, by delivery; a line for several loads in equal parts. */
@@ -95,10 +131,10 @@ function billedYards(ties: readonly BilledTie[]): Map<string, Quantity> {
   return yards;
 }
 
-function sourceOf(deliveryIds: readonly string[], billed: ReadonlySet<string>) {
-  if (deliveryIds.length === 0) return 'none';
-  const count = deliveryIds.filter((id) => billed.has(id)).length;
-  return count === 0 ? 'expected' : count === deliveryIds.length ? 'billed' : 'both';
+function sourceOf(pricedIds: readonly string[], billed: BilledSoFar) {
+  if (pricedIds.length === 0) return 'none';
+  const count = pricedIds.filter((id) => billed.has(id)).length;
+  return count === 0 ? 'expected' : count === pricedIds.length ? 'billed' : 'both';
 }
 
 /** Every placement of the filter with its deliveries, what was ordered, and what it cost. */
@@ -112,31 +148,28 @@ export async function placedFacts(
   const pumpTickets = await placedPumpTickets(scope, ids);
   const ordered = await orderedYards(scope, ids);
   const ties = await billedTies(scope, ids);
-  const billed = new Set(
-    ties.filter((tie) => isMainCharge(tie.chargeKind)).map((tie) => tie.deliveryId),
-  );
-  const unbilled = <Facts extends { readonly id: string }>(rows: readonly { facts: Facts }[]) =>
-    rows.map((row) => row.facts).filter((facts) => !billed.has(facts.id));
+  const billed = billedSoFar(ties);
+  const factsOf = <Facts>(rows: readonly { facts: Facts }[]) => rows.map((row) => row.facts);
+  const expected = await expectedShares(scope, factsOf(tickets), factsOf(pumpTickets), billed);
   const shares = grouped(
-    [
-      ...(await billedShares(scope, ties)),
-      ...(await expectedShares(scope, unbilled(tickets), unbilled(pumpTickets))),
-    ],
+    [...(await billedShares(scope, ties)), ...expected.shares],
     (share) => share.deliveryId,
   );
   const yards = billedYards(ties);
   const ticketsOf = grouped(tickets, (row) => row.placementId);
   const pumpsOf = grouped(pumpTickets, (row) => row.placementId);
   return found.map((placement): PlacedFacts => {
-    const loads = (ticketsOf.get(placement.id) ?? []).map((row) => row.facts);
-    const pumps = (pumpsOf.get(placement.id) ?? []).map((row) => row.facts);
+    const loads = factsOf(ticketsOf.get(placement.id) ?? []);
+    const pumps = factsOf(pumpsOf.get(placement.id) ?? []);
     const deliveryIds = [...loads, ...pumps].map((one) => one.id);
     const charged = loads.flatMap((load) => yards.get(load.id) ?? []);
+    const pricedIds = deliveryIds.filter((id) => !expected.unpriced.has(id));
     const orderedYd3 = ordered.get(placement.id);
     const orNull = (text: string | null | undefined) => (text ? quantity(text) : null);
     return {
       placement,
-      costFrom: sourceOf(deliveryIds, billed),
+      costFrom: sourceOf(pricedIds, billed),
+      unpriced: deliveryIds.length - pricedIds.length,
       facts: {
         figuredYd3: quantity(placement.figuredYd3),
         areaFt2: orNull(placement.areaFt2),

@@ -18,7 +18,7 @@ const YieldChart = dynamic(() => import('./yield-chart').then((part) => part.Yie
   ssr: false,
 });
 
-const FILTERS = ['from', 'to', 'jobId'];
+const FILTERS = ['from', 'to', 'jobId', 'supplierId'];
 
 interface YieldScreenProps {
   first: YieldAnswer;
@@ -42,7 +42,7 @@ export function YieldScreen({ first, firstQuery }: YieldScreenProps) {
     <>
       <search
         aria-label={words.title}
-        className="grid grid-cols-2 gap-3 px-4 py-3 md:grid-cols-[auto_auto_1fr] md:px-6"
+        className="grid grid-cols-2 gap-3 px-4 py-3 md:grid-cols-[auto_auto_1fr_1fr] md:px-6"
       >
         <TextField label={words.from} type="date" {...bind('from')} />
         <TextField label={words.to} type="date" {...bind('to')} />
@@ -55,6 +55,18 @@ export function YieldScreen({ first, firstQuery }: YieldScreenProps) {
           {data?.jobs.map((one) => (
             <option key={one.id} value={one.id}>
               {one.number} {one.name}
+            </option>
+          ))}
+        </SelectField>
+        <SelectField
+          label={words.supplier}
+          fieldClassName="col-span-2 md:col-span-1 md:max-w-md"
+          {...bind('supplierId')}
+        >
+          <option value="">{words.allSuppliers}</option>
+          {data?.suppliers.map((one) => (
+            <option key={one.id} value={one.id}>
+              {one.name}
             </option>
           ))}
         </SelectField>

@@ -1,7 +1,7 @@
 'use client';
 
 import Link from 'next/link';
-import { Fragment, useState } from 'react';
+import { Fragment, type ReactNode, useState } from 'react';
 import type { useListFilter } from '@/components/shell/use-list-filter';
 import { classNames } from '@/components/ui/class-names';
 import { YardsFigure } from '@/components/ui/figures';
@@ -81,6 +81,7 @@ export function YieldTable({ data, filter }: YieldTableProps) {
                         <Link href={`${routes.tickets()}?placementId=${one.placementId}`}>
                           {words.tickets}
                         </Link>
+                        {one.smallSample && <FewLoads />}
                       </span>
                     </span>
                   </Td>
@@ -135,7 +136,7 @@ function JobCell({ row, open, onToggle }: JobCellProps) {
       <span className="block pl-5 text-[12.5px] text-ink-soft">
         {row.jobNumber} · {words.loads(row.loads)} ·{' '}
         <Link href={`${routes.tickets()}?jobId=${row.jobId}`}>{words.tickets}</Link>
-        {row.smallSample && <span title={words.smallSays}> · {words.small}</span>}
+        {row.smallSample && <FewLoads />}
       </span>
     </>
   );
@@ -183,7 +184,11 @@ function Figures({ of: row, name }: { of: YieldFigures; name: string }) {
   );
 }
 
-function Small({ children }: { children: string }) {
+function FewLoads() {
+  return <span title={words.smallSays}> · {words.small}</span>;
+}
+
+function Small({ children }: { children: ReactNode }) {
   return <span className="block text-[12.5px] text-ink-soft">{children}</span>;
 }
 
@@ -201,13 +206,19 @@ function Overrun({ row }: { row: YieldFigures }) {
 
 /** The cost a yard; what it is made of unfolds. */
 function Cost({ row, name }: { row: YieldFigures; name: string }) {
-  if (row.costPerYd3 === null) return '–';
+  const without = row.unpriced > 0 && (
+    <Small>
+      <span title={words.unpricedSays}>{words.unpriced(row.unpriced)}</span>
+    </Small>
+  );
+  if (row.costPerYd3 === null) return <>–{without}</>;
   return (
     <details>
       <summary aria-label={words.costOf(name)} className="list-none">
         <span className="font-semibold">{moneyFigure(row.costPerYd3)}</span>{' '}
         <span className="text-ink-soft">{words.columns.perYard} ▾</span>
         {row.costFrom !== 'billed' && <Small>{words.sources[row.costFrom]}</Small>}
+        {without}
       </summary>
       <dl className="mt-1 grid grid-cols-[1fr_auto] gap-x-4 border-t border-wet pt-1 text-[13px] font-normal">
         {row.costParts.map(({ part, perYd3, amount }) => (
