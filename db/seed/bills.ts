@@ -4,8 +4,8 @@ import { money, roundCents } from '../../lib/domain/money/money';
 import { expectedBill } from '../../lib/domain/rating/expected-bill';
 import type { Plant } from './planted';
 import { PLANTS } from './planted';
-import { POURS, type SupplierKey } from './story';
-import { type StoryFacts, storyFacts, ticketNumber } from './story-records';
+import type { SupplierKey } from './story';
+import { type StoryFacts, storyFacts } from './story-records';
 
 /** A line as the invented supplier bills it, before it is written in that supplier's style. */
 export interface BillRow {
@@ -221,13 +221,4 @@ function withTax(
     });
   });
   return result;
-}
-
-export const BILLED_MONTHS = ['2026-09', '2026-10', '2026-11'] as const;
-
-/** Ticket numbers of a supplier's pours in a month, for tests and the reader of the demo. */
-export function ticketNumbersOf(supplier: 'cinderRidge' | 'halvorsen', month: string): string[] {
-  return POURS.filter((pour) => pour.supplier === supplier && pour.date.startsWith(month)).flatMap(
-    (pour) => pour.loads.map((_, index) => ticketNumber(supplier, pour.firstTicket + index)),
-  );
 }

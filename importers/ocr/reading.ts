@@ -47,7 +47,6 @@ export const fieldReadingSchema = z.object({
   doubtful: z.boolean(),
   box: boxSchema,
 });
-export type FieldReading = z.infer<typeof fieldReadingSchema>;
 
 /** Fields by name; one that is not on the ticket is absent. */
 export const ticketFieldsSchema = z.partialRecord(z.enum(TICKET_FIELDS), fieldReadingSchema);

@@ -24,7 +24,6 @@ export const SUGGESTED_FIELDS = [
   'leftAt',
   'waterAddedGal',
 ] as const;
-export type SuggestedField = (typeof SUGGESTED_FIELDS)[number];
 
 /** What the reading would put into the ticket, as a form shows it; absent where it says nothing. */
 export const suggestion = z.object({

@@ -27,8 +27,6 @@ export const placementFields = {
   wastePercent: decimalText.refine((text) => Number(text) >= 0 && Number(text) <= 50, '0 to 50'),
   notes: note,
 };
-export const placementValues = z.strictObject(placementFields);
-
 export const placementRow = z.object({
   id: uuid,
   jobId: uuid,

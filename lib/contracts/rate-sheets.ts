@@ -16,7 +16,6 @@ const inOrder = (value: { effectiveFrom: string; effectiveTo: string | null }) =
 const ORDER = { path: ['effectiveTo'], message: 'before the first day' };
 
 export const rateSheetValues = z.strictObject(fields).refine(inOrder, ORDER);
-export type RateSheetValues = z.infer<typeof rateSheetValues>;
 
 /** A clause as it is read: its words, and what is wrong with it. */
 export const clauseInWords = z.object({ clause: clauseSchema, says: z.string() });

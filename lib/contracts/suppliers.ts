@@ -49,7 +49,6 @@ export const supplierDetail = z.object({
   /** Layouts of its files that are remembered from earlier imports. */
   rememberedLayouts: z.number().int(),
 });
-export type SupplierDetail = z.infer<typeof supplierDetail>;
 
 const filters = {
   kind: z.enum([...SUPPLIER_KINDS, 'all']).default('all'),

@@ -4,7 +4,6 @@ import { clockMinutes, decimalText, note, pageInput, pageOf, plainDate, uuid } f
 import { photo, READING_STATES } from './photos';
 
 export const TICKET_STATUSES = ['toCheck', 'confirmed', 'rejected'] as const;
-export type TicketStatus = (typeof TICKET_STATUSES)[number];
 
 /** The truck clock in the order in which a load lives. */
 export const CLOCK_FIELDS = [

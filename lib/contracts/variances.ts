@@ -9,7 +9,6 @@ export const VARIANCE_STATUSES = [
   'claimed',
   'gone',
 ] as const;
-export type VarianceStatus = (typeof VARIANCE_STATUSES)[number];
 
 /** Days since the end of the statement's period. */
 export const AGES = ['0-30', '31-60', '61-90', 'over90'] as const;

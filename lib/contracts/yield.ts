@@ -62,7 +62,6 @@ export const yieldPlacement = z.object({
   pourDate: plainDate,
   ...figures,
 });
-export type YieldPlacement = z.infer<typeof yieldPlacement>;
 
 export const yieldJob = z.object({
   jobId: uuid,

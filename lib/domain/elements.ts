@@ -10,4 +10,3 @@ export const ELEMENTS = [
   'deck',
   'other',
 ] as const;
-export type Element = (typeof ELEMENTS)[number];

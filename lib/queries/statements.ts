@@ -1,6 +1,6 @@
 import type { QueryClient } from '@tanstack/react-query';
 import { queryOptions } from '@tanstack/react-query';
-import { importPreview, listImportsOutput } from '../contracts/imports';
+import { importPreview } from '../contracts/imports';
 import { candidatesOutput, refreshOutput, sheet } from '../contracts/sheet';
 import { listStatementsOutput } from '../contracts/statements';
 import { listVariancesOutput } from '../contracts/variances';
@@ -27,12 +27,6 @@ export const candidatesQuery = (statementId: string, billLineId: string, search:
       apiGet(`/api/statements/${statementId}/lines/${billLineId}/candidates`, candidatesOutput, {
         search,
       }),
-  });
-
-export const importsQuery = () =>
-  queryOptions({
-    queryKey: ['imports', 'list'],
-    queryFn: () => apiGet('/api/imports', listImportsOutput),
   });
 
 export const importPreviewQuery = (importId: string) =>

@@ -43,7 +43,12 @@ export function YieldChart({ rows }: { rows: readonly YieldJob[] }) {
         <figure key={title}>
           <figcaption className="mb-1 text-[13px] font-semibold text-ink-soft">{title}</figcaption>
           <ResponsiveContainer width="100%" height={points.length * BAR_PX + 40}>
-            <BarChart data={[...points]} layout="vertical" margin={{ left: 0, right: 24 }}>
+            <BarChart
+              accessibilityLayer={false}
+              data={[...points]}
+              layout="vertical"
+              margin={{ left: 0, right: 24 }}
+            >
               <CartesianGrid horizontal={false} stroke="var(--cured)" />
               <XAxis type="number" tick={TICK} stroke="var(--wet)" />
               <YAxis type="category" dataKey="name" width={132} tick={TICK} stroke="var(--wet)" />
