@@ -39,7 +39,7 @@ async function start(port: number, dataDir: string): Promise<Running> {
       ...process.env,
       DATA_DIR: dataDir,
       DATABASE_URL: '',
-      DEMO: '0',
+      DEMO: 'off',
       APP_ORIGIN: `http://localhost:${port}`,
       LOG_LEVEL: 'fatal',
       NODE_ENV: 'production',
