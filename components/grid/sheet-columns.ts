@@ -165,7 +165,10 @@ const findingColumns: Column[] = [
   }),
   figure(words.columns.expected, (row) => row.expected, decimalFigure, { width: 78 }),
   figure(words.columns.difference, (row) => row.difference, differenceFigure, {
-    width: 82,
+    // Room for the scrollbar, which lies over the last column.
+    width: 98,
+    cellClass: 'pr-5!',
+    headerClass: 'pr-5!',
     cellClassRules: {
       'text-keel font-semibold': ({ data }) =>
         data !== undefined && data.verdict === 'finding' && signOf(data.difference) === 'positive',

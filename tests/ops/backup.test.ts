@@ -159,4 +159,4 @@ test('the commands say what they did, and refuse in a sentence', async () => {
   const server = await run('db/backup.ts', [], { DATABASE_URL: 'postgres://nowhere/x' });
   expect(server).toMatchObject({ code: 1, said: expect.stringContaining('pg_dump') });
   expect(await numbers(await openStore(env()))).toEqual(['before']);
-}, 60_000);
+}, 240_000);

@@ -75,7 +75,7 @@ test('of six processes that find a dead lock at the same moment exactly one gets
     expect(said.filter((line) => line.startsWith('DataFolderInUse'))).toHaveLength(5);
     for (const child of contenders) child.process.kill('SIGKILL');
   }
-}, 60_000);
+}, 240_000);
 
 const writeLock = (dataDir: string, change: Record<string, unknown>) => {
   const lock = lockDataFolder(dataDir);

@@ -43,7 +43,10 @@ const routeFileOf = (address: string) =>
 /** Every exported verb of lib/services, by the name it is exported under. */
 async function exportedVerbs(): Promise<Map<unknown, string>> {
   const found = new Map<unknown, string>();
-  for (const file of filesUnder('lib/services', (name) => name.endsWith('.ts'))) {
+  for (const file of filesUnder(
+    'lib/services',
+    (name) => name.endsWith('.ts') && !name.endsWith('.test.ts'),
+  )) {
     const module: Record<string, unknown> = await import(path.join(ROOT, file));
     for (const [name, value] of Object.entries(module)) {
       const isVerb =

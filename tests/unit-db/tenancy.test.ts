@@ -22,7 +22,7 @@ beforeAll(async () => {
   store = await testStore();
   ours = await fullCompany(store);
   theirs = await fullCompany(store);
-}, 120_000);
+}, 300_000);
 afterAll(async () => {
   await store.close();
   folder.remove();

@@ -28,7 +28,7 @@ beforeAll(async () => {
   await finishDemo(store, clock);
   const [company] = await store.handle.select().from(companies).where(eq(companies.isDemo, true));
   companyId = company?.id ?? '';
-}, 120_000);
+}, 300_000);
 afterAll(async () => {
   await store.close();
   rmSync(folder, { recursive: true, force: true });
