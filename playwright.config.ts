@@ -8,7 +8,8 @@ export default defineConfig({
   outputDir: 'test-results',
   fullyParallel: false,
   workers: 2,
-  timeout: 60_000,
+  timeout: 180_000,
+  expect: { timeout: 20_000 },
   reporter: [
     ['list'],
     ['json', { outputFile: process.env.PLAYWRIGHT_JSON_OUTPUT_FILE ?? 'test-results/report.json' }],

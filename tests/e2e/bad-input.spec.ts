@@ -14,7 +14,7 @@ test('a file that is no bill gets a clear answer, and nothing of it stays', asyn
     bookkeeper.post(`/api/imports?supplierId=${suppliers.rows[0].id}`, {
       data,
       headers: { 'content-type': 'text/csv', 'x-file-name': 'bad.csv' },
-      timeout: 60_000,
+      timeout: 240_000,
     });
   const before = await (await bookkeeper.get('/api/imports')).json();
   const photo = readFileSync(path.join('tests', 'fixtures', 'tickets', '558801.jpg'));
@@ -68,14 +68,14 @@ test('a broken row is named on the preview, and nothing is taken in before it is
 test('a photo that is no ticket says so, and a file that is no photo is refused', async ({
   baseURL,
 }) => {
-  test.setTimeout(120_000);
+  test.setTimeout(400_000);
   const foreman = await signedIn(baseURL, 'foreman');
   const [placement] = (await (await foreman.get('/api/pour-day')).json()).placements;
   const send = (data: Buffer | string, clientId: string) =>
     foreman.post(`/api/placements/${placement.id}/photos?clientId=${clientId}`, {
       data,
       headers: { 'content-type': 'image/jpeg', 'x-file-name': 'photo.jpg' },
-      timeout: 60_000,
+      timeout: 240_000,
     });
   const refused = await send(PIXEL_PDF, crypto.randomUUID());
   expect(refused.status()).toBe(415);
@@ -87,7 +87,7 @@ test('a photo that is no ticket says so, and a file that is no photo is refused'
   expect(taken.status(), await taken.text()).toBe(200);
   const { ticketId, photoId } = await taken.json();
   const reading = async () => (await foreman.get(`/api/photos/${photoId}/reading`)).json();
-  await expect.poll(async () => (await reading()).state, { timeout: 60_000 }).toBe('failed');
+  await expect.poll(async () => (await reading()).state, { timeout: 240_000 }).toBe('failed');
   expect((await reading()).failureSentence).toMatch(/\w/);
   const { version } = await (await foreman.get(`/api/tickets/${ticketId}`)).json();
   const aside = await foreman.post(`/api/tickets/${ticketId}/reject`, {

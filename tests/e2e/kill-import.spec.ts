@@ -53,7 +53,7 @@ async function start(port: number, dataDir: string): Promise<Running> {
           (answer) => answer.status,
           () => 0,
         ),
-      { timeout: 60_000, intervals: [100] },
+      { timeout: 180_000, intervals: [100] },
     )
     .toBe(200);
   return { child, gone };
@@ -86,7 +86,7 @@ async function linesOf(owner: APIRequestContext, number: string): Promise<number
 }
 
 test(`${KILLS} times killed during an import: what was confirmed is there, once, and nothing is there in part`, async () => {
-  test.setTimeout(400_000);
+  test.setTimeout(1_200_000);
   const dataDir = mkdtempSync(path.join(os.tmpdir(), 'strikeoff-kill-'));
   const port = await freePort();
   let server = await start(port, dataDir);

@@ -14,7 +14,7 @@ test('the foreman snaps a ticket on a small phone, corrects what the reader doub
   browser,
   baseURL,
 }) => {
-  test.setTimeout(120_000);
+  test.setTimeout(400_000);
   const context = await windowOf(browser, baseURL, 'foreman', {
     viewport: { width: 360, height: 740 },
     isMobile: true,
@@ -36,7 +36,7 @@ test('the foreman snaps a ticket on a small phone, corrects what the reader doub
 
   await page.getByLabel('Choose a photo').setInputFiles(PHOTO);
   await page.waitForURL(/\/pour-day\/tickets\//);
-  await expect(page.getByRole('heading', { name: /look/i })).toBeVisible({ timeout: 60_000 });
+  await expect(page.getByRole('heading', { name: /look/i })).toBeVisible({ timeout: 240_000 });
   await expect(page.getByLabel('Ticket number')).toHaveValue('558903');
   const doubted = page.getByLabel('Yards', { exact: true });
   await doubted.fill('10.00');
