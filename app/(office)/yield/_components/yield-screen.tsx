@@ -2,6 +2,7 @@
 
 import { keepPreviousData, useQuery } from '@tanstack/react-query';
 import dynamic from 'next/dynamic';
+import { Fragment } from 'react';
 import { sameQuery } from '@/components/shell/list-query';
 import { useListFilter } from '@/components/shell/use-list-filter';
 import { Button } from '@/components/ui/button';
@@ -42,6 +43,7 @@ export function YieldScreen({ first, firstQuery }: YieldScreenProps) {
     <>
       <search
         aria-label={words.title}
+        data-no-print={filtered ? undefined : true}
         className="grid grid-cols-2 gap-3 px-4 py-3 md:grid-cols-[auto_auto_1fr_1fr] md:px-6"
       >
         <TextField label={words.from} type="date" {...bind('from')} />
@@ -82,6 +84,7 @@ export function YieldScreen({ first, firstQuery }: YieldScreenProps) {
           <a
             href={`/api/yield/export?${new URLSearchParams(filter.query).toString()}`}
             download
+            data-no-print
             className="ml-auto inline-flex min-h-11 items-center"
           >
             {words.export}
@@ -104,11 +107,32 @@ export function YieldScreen({ first, firstQuery }: YieldScreenProps) {
         <>
           <YieldTable data={data} filter={filter} />
           <p className="px-4 py-2 text-[13.5px] text-ink-soft md:px-6">{words.says}</p>
+          <Legend />
           <Section title={words.chartTitle}>
             <YieldChart rows={data.rows} />
           </Section>
         </>
       )}
     </>
+  );
+}
+
+/** What each figure says, for whoever has no pointer to hover a column's head with. */
+function Legend() {
+  const names = Object.keys(words.explain) as (keyof typeof words.explain)[];
+  return (
+    <details data-no-print className="px-4 pb-4 text-[13.5px] md:px-6">
+      <summary className="inline-flex min-h-11 cursor-pointer items-center text-carbon">
+        {words.explainTitle}
+      </summary>
+      <dl className="grid max-w-3xl gap-x-4 gap-y-1 md:grid-cols-[10rem_1fr]">
+        {names.map((name) => (
+          <Fragment key={name}>
+            <dt className="font-semibold">{words.columns[name]}</dt>
+            <dd className="text-ink-soft max-md:mb-2">{words.explain[name]}</dd>
+          </Fragment>
+        ))}
+      </dl>
+    </details>
   );
 }

@@ -24,12 +24,17 @@ interface YieldTableProps {
   filter: ReturnType<typeof useListFilter>;
 }
 
+/** On a phone a row is a slip of two columns: what is over and what it cost come first. */
+const ON_PHONE =
+  '[&_td]:whitespace-nowrap [&_tr]:max-md:grid! [&_tr]:max-md:grid-cols-2 [&_td]:max-md:order-3 [&_td:first-child]:max-md:order-1 [&_td:first-child]:max-md:col-span-2';
+const FIRST_ON_PHONE = 'max-md:order-2!';
+
 /** Jobs with their figures; each unfolds into its placements, each leads to its tickets. */
 export function YieldTable({ data, filter }: YieldTableProps) {
   const [openId, setOpenId] = useState<string | null>(null);
   const head = { filter, standard: 'overrun' };
   return (
-    <RuledTable caption={words.list} className="[&_td]:whitespace-nowrap">
+    <RuledTable caption={words.list} slipsOnPhone className={ON_PHONE}>
       <thead>
         <tr>
           <SortHead sort="job" {...head}>
@@ -128,7 +133,7 @@ function JobCell({ row, open, onToggle }: JobCellProps) {
         type="button"
         aria-expanded={open}
         onClick={onToggle}
-        className="inline-flex min-h-9 items-baseline gap-1.5 text-left font-semibold text-carbon"
+        className="inline-flex min-h-9 items-baseline md:min-h-6 gap-1.5 text-left font-semibold text-carbon"
       >
         <span aria-hidden>{open ? '▾' : '▸'}</span>
         {row.jobName}
@@ -142,44 +147,62 @@ function JobCell({ row, open, onToggle }: JobCellProps) {
   );
 }
 
+interface CellProps {
+  label: string;
+  copy?: 'ordered' | 'delivered' | 'billed';
+  className?: string;
+  children: ReactNode;
+}
+
+/** A figure under its column's head; on a phone, where there is none, under its own. */
+function Cell({ label, copy, className, children }: CellProps) {
+  return (
+    <Td align="right" className={className} {...(copy ? { copy } : {})}>
+      <span className="block text-[12.5px] font-normal text-ink-soft md:hidden">{label}</span>
+      {children}
+    </Td>
+  );
+}
+
 function Figures({ of: row, name }: { of: YieldFigures; name: string }) {
+  const { columns } = words;
   return (
     <>
-      <Td align="right">
+      <Cell label={columns.figured}>
         <YardsFigure value={row.figuredYd3} unit={false} />
-      </Td>
-      <Td align="right" copy="ordered">
+      </Cell>
+      <Cell label={columns.ordered} copy="ordered">
         <YardsFigure value={row.orderedYd3} unit={false} />
-      </Td>
-      <Td align="right" copy="delivered">
+      </Cell>
+      <Cell label={columns.delivered} copy="delivered">
         <YardsFigure value={row.deliveredYd3} unit={false} />
         {signOf(row.returnedYd3) !== 'zero' && (
           <Small>{words.returned(decimalFigure(row.returnedYd3))}</Small>
         )}
-      </Td>
-      <Td align="right" copy="billed">
+      </Cell>
+      <Cell label={columns.billed} copy="billed">
         <YardsFigure value={row.billedYd3} unit={false} />
-      </Td>
-      <Td align="right">
+      </Cell>
+      <Cell label={columns.overrun} className={FIRST_ON_PHONE}>
         <Overrun row={row} />
-      </Td>
-      <Td align="right">
+      </Cell>
+      <Cell label={columns.thickness}>
         {row.impliedThicknessIn === null ? '–' : decimalFigure(row.impliedThicknessIn)}
         {row.plannedThicknessIn !== null && (
           <Small>{words.planned(decimalFigure(row.plannedThicknessIn))}</Small>
         )}
-      </Td>
-      <Td align="right">
+      </Cell>
+      <Cell label={columns.waiting}>
         {row.minutesPerLoad === null
           ? '–'
           : words.minutesPerLoad(decimalFigure(row.minutesPerLoad, 0))}
         {row.minutesPerYd3 !== null && (
           <Small>{words.minutesPerYard(decimalFigure(row.minutesPerYd3, 1))}</Small>
         )}
-      </Td>
-      <Td align="right">
+      </Cell>
+      <Cell label={columns.cost} className={FIRST_ON_PHONE}>
         <Cost row={row} name={name} />
-      </Td>
+      </Cell>
     </>
   );
 }
@@ -204,7 +227,7 @@ function Overrun({ row }: { row: YieldFigures }) {
   );
 }
 
-/** The cost a yard; what it is made of unfolds. */
+/** The cost a yard; what it is made of unfolds, a yard and in all. */
 function Cost({ row, name }: { row: YieldFigures; name: string }) {
   const without = row.unpriced > 0 && (
     <Small>
@@ -220,16 +243,29 @@ function Cost({ row, name }: { row: YieldFigures; name: string }) {
         {row.costFrom !== 'billed' && <Small>{words.sources[row.costFrom]}</Small>}
         {without}
       </summary>
-      <dl className="mt-1 grid grid-cols-[1fr_auto] gap-x-4 border-t border-wet pt-1 text-[13px] font-normal">
-        {row.costParts.map(({ part, perYd3, amount }) => (
-          <div key={part} className="contents">
-            <dt className="text-left text-ink-soft">{words.parts[part]}</dt>
-            <dd>{perYd3 === null ? moneyFigure(amount) : moneyFigure(perYd3)}</dd>
-          </div>
-        ))}
-        <dt className="text-left font-semibold">{words.total}</dt>
-        <dd className="font-semibold">{moneyFigure(row.cost)}</dd>
-      </dl>
+      <CostParts row={row} />
     </details>
+  );
+}
+
+function CostParts({ row }: { row: YieldFigures }) {
+  const lines = [
+    ...row.costParts.map(({ part, perYd3, amount }) => ({
+      name: words.parts[part],
+      perYd3,
+      amount,
+    })),
+    { name: words.total, perYd3: row.costPerYd3, amount: row.cost },
+  ];
+  return (
+    <dl className="mt-1 border-t border-wet pt-1 text-[13px] font-normal last:*:font-semibold">
+      {lines.map(({ name, perYd3, amount }) => (
+        <div key={name} className="grid grid-cols-[1fr_5rem_6rem]">
+          <dt className="text-left text-ink-soft">{name}</dt>
+          <dd>{perYd3 === null ? '–' : moneyFigure(perYd3)}</dd>
+          <dd>{moneyFigure(amount)}</dd>
+        </div>
+      ))}
+    </dl>
   );
 }

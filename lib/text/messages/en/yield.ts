@@ -29,6 +29,7 @@ export const yieldWords = {
     cost: 'All-in cost',
     perYard: 'a yard',
   },
+  explainTitle: 'What the figures say',
   explain: {
     figured: 'Yards from the drawing, without waste',
     ordered: 'Yards on the orders of these placements',
