@@ -69,7 +69,7 @@ export async function testPour(
     position: 1,
     code: '4000AE',
     quantity: '60.00',
-    unit: 'yd3',
+    unit: 'yd³',
   });
   return pour;
 }
