@@ -41,6 +41,7 @@ async function onServer(url: string): Promise<Store> {
   const pool = new pg.Pool({ connectionString: address.href, max: 5 });
   // Dropping the database ends connections that are still saying goodbye.
   pool.on('error', () => undefined);
+  pool.on('connect', (client) => client.on('error', () => undefined));
   return {
     kind: 'postgres',
     handle: drizzlePg({ client: pool }) as unknown as Handle,
