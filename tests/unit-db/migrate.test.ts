@@ -34,6 +34,9 @@ test.runIf(server)(
     address.pathname = `/${name}`;
     const stores = Array.from({ length: 3 }, (): Store => {
       const pool = new pg.Pool({ connectionString: address.href, max: 3 });
+      // Dropping the database ends connections that are still saying goodbye.
+      pool.on('error', () => undefined);
+      pool.on('connect', (client) => client.on('error', () => undefined));
       const handle = drizzle({ client: pool }) as unknown as Handle;
       return { kind: 'postgres', handle, engine: null, close: () => pool.end() };
     });
