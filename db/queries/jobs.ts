@@ -18,6 +18,7 @@ import { orderLines, orders } from '../schema/orders';
 import { people } from '../schema/people';
 import { tickets } from '../schema/tickets';
 import type { Scope } from '../tx';
+import { isWithSupplier } from './with-supplier';
 
 export interface JobFilter {
   readonly status: 'open' | 'finished' | 'all';
@@ -35,7 +36,7 @@ const ROW = {
   orderedYd3: sql<string | null>`(select sum(l.quantity)::numeric(14,2)::text
     from ${orders} o join ${orderLines} l on l.company_id = o.company_id and l.order_id = o.id
     where o.company_id = jobs.company_id and o.job_id = jobs.id
-    and o.status <> 'cancelled' and l.unit = 'yd³')`,
+    and ${isWithSupplier('o')} and l.unit = 'yd³')`,
   deliveredYd3: sql<string>`(select coalesce(sum(t.quantity_yd3), 0)::numeric(14,2)::text
     from ${tickets} t where t.company_id = jobs.company_id and t.job_id = jobs.id
     and t.status <> 'rejected')`,

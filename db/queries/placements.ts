@@ -5,12 +5,13 @@ import { orderLines, orders } from '../schema/orders';
 import { tickets } from '../schema/tickets';
 import type { Scope } from '../tx';
 import { inCrew } from './crew';
+import { isWithSupplier } from './with-supplier';
 
-/** Yards on orders of the placement, cancelled ones left out; null where there are none. */
-export const orderedOfPlacement = sql<string | null>`(select sum(l.quantity)::numeric(14,2)::text
+/** Yards on the placement's orders that are with a supplier; null where there are none. */
+const orderedOfPlacement = sql<string | null>`(select sum(l.quantity)::numeric(14,2)::text
   from ${orders} o join ${orderLines} l on l.company_id = o.company_id and l.order_id = o.id
   where o.company_id = ${placements.companyId} and o.placement_id = ${placements.id}
-  and o.status <> 'cancelled' and l.unit = 'yd³')`;
+  and ${isWithSupplier('o')} and l.unit = 'yd³')`;
 const deliveredOfPlacement = sql<string>`(select coalesce(sum(t.quantity_yd3), 0)::numeric(14,2)::text
   from ${tickets} t where t.company_id = ${placements.companyId}
   and t.placement_id = ${placements.id} and t.status <> 'rejected')`;

@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, inArray, ne } from 'drizzle-orm';
+import { and, asc, desc, eq, inArray } from 'drizzle-orm';
 import type { TicketChoices, TicketDetail } from '../../lib/contracts/tickets';
 import { activity } from '../schema/activity';
 import { jobs, placements } from '../schema/jobs';
@@ -7,6 +7,7 @@ import { billLines, invoices, matches, statements } from '../schema/statements';
 import { suppliers } from '../schema/suppliers';
 import type { Scope } from '../tx';
 import { inCrew } from './crew';
+import { isWithSupplier } from './with-supplier';
 
 /** A form's or a filter's list is long enough at this; the newest come first. */
 const MAX_CHOICES = 500;
@@ -69,7 +70,7 @@ export interface PlacementOrder {
   readonly lines: { code: string; quantity: string; unit: string }[];
 }
 
-/** What was ordered for placements, by placement, cancelled orders left out. */
+/** What was ordered for placements, by placement: orders that are with a supplier. */
 export async function ordersOfPlacements(
   scope: Scope,
   placementIds: string[],
@@ -103,7 +104,7 @@ export async function ordersOfPlacements(
       and(
         eq(orders.companyId, scope.companyId),
         inArray(orders.placementId, placementIds),
-        ne(orders.status, 'cancelled'),
+        isWithSupplier('orders'),
       ),
     )
     .orderBy(asc(orders.number), asc(orders.id), asc(orderLines.position));

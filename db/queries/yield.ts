@@ -7,6 +7,7 @@ import { suppliers } from '../schema/suppliers';
 import { pumpTickets, tickets } from '../schema/tickets';
 import type { Scope } from '../tx';
 import { pumpTicketFactsOf, ticketFactsOf } from './sheet-facts';
+import { isWithSupplier } from './with-supplier';
 
 export interface PouredPlacement {
   readonly id: string;
@@ -118,7 +119,7 @@ export async function placedPumpTickets(
   }));
 }
 
-/** Yards ordered for each placement, cancelled orders left out. */
+/** Yards ordered for each placement, by orders that are with a supplier. */
 export async function orderedYards(
   scope: Scope,
   placementIds: readonly string[],
@@ -139,7 +140,7 @@ export async function orderedYards(
         eq(orders.companyId, scope.companyId),
         inArray(orders.placementId, [...placementIds]),
         eq(orderLines.unit, 'yd³'),
-        sql`${orders.status} <> 'cancelled'`,
+        isWithSupplier('orders'),
       ),
     )
     .groupBy(orders.placementId);

@@ -190,11 +190,31 @@ describe('orders', () => {
   });
 });
 
+describe('a sent order', () => {
+  it('stays with the supplier who has it', async () => {
+    const w = await world();
+    const { id } = await draft(w);
+    await value(sendOrder, w.owner, { orderId: id });
+    const supplierId = newId();
+    await store.handle
+      .insert(suppliers)
+      .values({ companyId: w.companyId, id: supplierId, name: 'Other', kind: 'readyMix' });
+    const moved = { orderId: id, version: 1, ...w.order, supplierId };
+    expect(await callVerb(updateOrder, w.owner, moved as never)).toMatchObject({
+      ok: false,
+      error: { code: 'conflict', issues: [{ path: 'supplierId' }] },
+    });
+  });
+});
+
 describe('placements', () => {
   it('keep their yards beside those ordered, and a job sums them up', async () => {
     const w = await world();
-    await draft(w);
-    expect(await value(getPlacement, w.foreman, { placementId: w.placement.id })).toMatchObject({
+    const order = await draft(w);
+    const placementId = w.placement.id;
+    expect((await value(getPlacement, w.foreman, { placementId })).orderedYd3).toBeNull();
+    await value(sendOrder, w.owner, { orderId: order.id });
+    expect(await value(getPlacement, w.foreman, { placementId })).toMatchObject({
       figuredYd3: '40.00',
       orderedYd3: '42.00',
       deliveredYd3: '0.00',
@@ -203,8 +223,16 @@ describe('placements', () => {
       figuredYd3: '40.00',
       orderedYd3: '42.00',
     });
+    const calledOff = { placementId, ...PLACEMENT, status: 'cancelled' };
+    expect(await callVerb(updatePlacement, w.bookkeeper, calledOff as never)).toMatchObject({
+      ok: false,
+      error: { code: 'conflict', issues: [{ path: 'status' }] },
+    });
+    await value(updateOrder, w.owner, { orderId: order.id, version: 1, ...w.order });
+    expect((await value(getPlacement, w.foreman, { placementId })).orderedYd3).toBe('42.00');
+    await value(cancelOrder, w.owner, { orderId: order.id, reason: 'rain' });
     await value(updatePlacement, w.bookkeeper, {
-      placementId: w.placement.id,
+      placementId,
       ...PLACEMENT,
       figuredYd3: '41.50',
       status: 'cancelled',

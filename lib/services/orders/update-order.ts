@@ -31,6 +31,16 @@ export const updateOrder = defineVerb({
         failure('conflict', 'Somebody changed this order while you had it open. Look at it again.'),
       );
     }
+    if (stored.sentAt !== null && stored.supplierId !== values.supplierId) {
+      return fail(
+        failure(
+          'conflict',
+          `${stored.supplierName} has this order. Cancel it, so that they are told, and draft a ` +
+            'new one for the other supplier.',
+          [{ path: 'supplierId', message: 'the order was sent to another' }],
+        ),
+      );
+    }
     if (!(await orderTiesHold(ctx.scope, values, crew))) {
       return fail(notFound('supplier, job or placement'));
     }

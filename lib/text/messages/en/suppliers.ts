@@ -76,6 +76,7 @@ export const rateWords = {
   approveTitle: 'Approve this rate sheet?',
   approveSays:
     'From its first day deliveries are held against it, and it is never changed again. A general sheet that is still open ends the day before.',
+  saveFirst: 'Save the draft before it is approved.',
   ownerApproves: 'The owner approves it.',
   remove: 'Throw the draft away',
   removeTitle: 'Throw this draft away?',

@@ -27,6 +27,7 @@ interface RateSheetScreenProps {
 export function RateSheetScreen({ sheet, jobs, mayApprove }: RateSheetScreenProps) {
   const router = useRouter();
   const [asking, setAsking] = useState<'approve' | 'remove' | null>(null);
+  const [dirty, setDirty] = useState(false);
   const isDraft = sheet.status === 'draft';
   const close = () => setAsking(null);
   async function approve() {
@@ -78,8 +79,14 @@ export function RateSheetScreen({ sheet, jobs, mayApprove }: RateSheetScreenProp
         actions={
           isDraft ? (
             <>
+              {mayApprove && dirty && (
+                <span className="self-center text-[14px] text-ink-soft">{words.saveFirst}</span>
+              )}
               {mayApprove ? (
-                <Button onClick={() => setAsking('approve')}>{words.approve}</Button>
+                // What would be approved is what is saved, never what only stands on the screen.
+                <Button disabled={dirty} onClick={() => setAsking('approve')}>
+                  {words.approve}
+                </Button>
               ) : (
                 <span className="self-center text-[14px] text-ink-soft">{words.ownerApproves}</span>
               )}
@@ -92,7 +99,11 @@ export function RateSheetScreen({ sheet, jobs, mayApprove }: RateSheetScreenProp
           )
         }
       />
-      {isDraft ? <SheetEditor sheet={sheet} jobs={jobs} /> : <Agreed sheet={sheet} />}
+      {isDraft ? (
+        <SheetEditor sheet={sheet} jobs={jobs} dirty={dirty} onDirty={setDirty} />
+      ) : (
+        <Agreed sheet={sheet} />
+      )}
       <ConfirmDialog
         open={asking === 'approve'}
         onClose={close}

@@ -20,6 +20,9 @@ import { type DraftClause, NEW_CLAUSES } from './clause-fields';
 
 interface SheetEditorProps {
   sheet: RateSheetDetail;
+  /** Whether something is written here that is not saved yet. */
+  dirty: boolean;
+  onDirty: (dirty: boolean) => void;
   jobs: readonly { id: string; number: string; name: string }[];
 }
 
@@ -53,7 +56,7 @@ function problemsOf(cards: readonly Card[]): Map<number, string[]> {
 }
 
 /** The draft of a rate sheet: its days, and its clauses one under the other. */
-export function SheetEditor({ sheet, jobs }: SheetEditorProps) {
+export function SheetEditor({ sheet, jobs, dirty, onDirty }: SheetEditorProps) {
   const router = useRouter();
   const locale = useLocale();
   const [nextKey, setNextKey] = useState(sheet.lines.length);
@@ -68,7 +71,6 @@ export function SheetEditor({ sheet, jobs }: SheetEditorProps) {
   });
   const [strict, setStrict] = useState(false);
   const [pending, setPending] = useState(false);
-  const [dirty, setDirty] = useState(false);
   const [problem, setProblem] = useState<string | null>(null);
   const [saved, setSaved] = useState(false);
   const kinds = sheet.supplierKind === 'pump' ? PUMP : READY_MIX;
@@ -85,7 +87,7 @@ export function SheetEditor({ sheet, jobs }: SheetEditorProps) {
 
   function change(next: readonly Card[]) {
     setCards(next);
-    setDirty(true);
+    onDirty(true);
     setSaved(false);
   }
   const bind = (name: keyof typeof head) => ({
@@ -93,7 +95,7 @@ export function SheetEditor({ sheet, jobs }: SheetEditorProps) {
     error: headError(name),
     onChange: (event: { target: { value: string } }) => {
       setHead({ ...head, [name]: event.target.value });
-      setDirty(true);
+      onDirty(true);
       setSaved(false);
     },
   });
@@ -104,7 +106,7 @@ export function SheetEditor({ sheet, jobs }: SheetEditorProps) {
     setPending(true);
     try {
       await apiSend('PUT', `/api/rate-sheets/${sheet.id}`, parsed.data, rateSheetDetail);
-      setDirty(false);
+      onDirty(false);
       setSaved(true);
       router.refresh();
     } catch (error) {
