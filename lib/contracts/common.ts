@@ -37,3 +37,11 @@ export const failureBody = z.object({
   }),
 });
 export type FailureBody = z.infer<typeof failureBody>;
+
+/** A file as an answer: a photo to show, or a list to download. */
+export const fileAnswer = z.object({
+  bytes: z.custom<Uint8Array>((value) => value instanceof Uint8Array),
+  mediaType: z.string(),
+  fileName: z.string(),
+  inline: z.boolean(),
+});

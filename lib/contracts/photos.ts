@@ -77,9 +77,3 @@ export const uploadPhotoOutput = z.object({
 });
 
 export const getPhotoInput = z.strictObject({ photoId: uuid });
-export const photoFile = z.object({
-  bytes: z.custom<Uint8Array>((value) => value instanceof Uint8Array),
-  mediaType: z.string(),
-  fileName: z.string(),
-  inline: z.boolean(),
-});

@@ -1,6 +1,6 @@
 import type { z } from 'zod';
 import { dayIn } from '../clock';
-import type { photoFile } from '../contracts/photos';
+import type { fileAnswer } from '../contracts/common';
 import type { Ctx } from './context';
 import { csvText } from './csv-text';
 
@@ -13,7 +13,7 @@ export function csvFile<Row>(
   name: string,
   columns: readonly CsvColumn<Row>[],
   rows: readonly Row[],
-): z.output<typeof photoFile> {
+): z.output<typeof fileAnswer> {
   const lines = rows.map((row) => columns.map(([, read]) => read(row)));
   return {
     bytes: new TextEncoder().encode(csvText([columns.map(([title]) => title), ...lines])),

@@ -16,7 +16,6 @@ test('a file that is no bill gets a clear answer, and nothing of it stays', asyn
       headers: { 'content-type': 'text/csv', 'x-file-name': 'bad.csv' },
       timeout: 240_000,
     });
-  const before = await (await bookkeeper.get('/api/imports')).json();
   const photo = readFileSync(path.join('tests', 'fixtures', 'tickets', '558801.jpg'));
   for (const [data, status, says] of [
     [PIXEL_PDF, 415, 'PDF'],
@@ -31,7 +30,8 @@ test('a file that is no bill gets a clear answer, and nothing of it stays', asyn
   const huge = await upload(Buffer.alloc(100 * MB, 'a,b,c\n'));
   expect(huge.status()).toBe(413);
   expect((await huge.json()).error.message).toContain('10 MB');
-  expect(await (await bookkeeper.get('/api/imports')).json()).toEqual(before);
+  const { rows } = await (await bookkeeper.get('/api/imports')).json();
+  expect(rows.filter((row: { fileName: string }) => row.fileName === 'bad.csv')).toEqual([]);
   await bookkeeper.dispose();
 });
 

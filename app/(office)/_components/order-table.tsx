@@ -1,5 +1,6 @@
 import Link from 'next/link';
 import { YardsFigure } from '@/components/ui/figures';
+import { OnSlip } from '@/components/ui/on-slip';
 import { RuledTable, Td, Th } from '@/components/ui/ruled-table';
 import { StatusText } from '@/components/ui/status-text';
 import type { OrderRow } from '@/lib/contracts/orders';
@@ -57,11 +58,11 @@ export function OrderTable({ rows, empty }: OrderTableProps) {
               )}
             </Td>
             <Td align="right" copy="ordered">
-              <span className="text-ink-soft md:hidden">{columns.ordered} </span>
+              <OnSlip>{columns.ordered}</OnSlip>
               <YardsFigure value={row.orderedYd3} />
             </Td>
             <Td align="right" copy="delivered">
-              <span className="text-ink-soft md:hidden">{columns.delivered} </span>
+              <OnSlip>{columns.delivered}</OnSlip>
               <YardsFigure value={row.deliveredYd3} />
             </Td>
             <Td>

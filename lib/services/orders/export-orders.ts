@@ -1,6 +1,6 @@
 import { listOrders } from '../../../db/queries/orders';
+import { fileAnswer } from '../../contracts/common';
 import { exportOrdersInput, type OrderRow } from '../../contracts/orders';
-import { photoFile as fileAnswer } from '../../contracts/photos';
 import { ok } from '../../domain/result';
 import { clockText } from '../../domain/time/clock-minutes';
 import { type CsvColumn, csvFile } from '../csv-file';

@@ -1,5 +1,6 @@
 import { findPhoto } from '../../../db/queries/photos';
-import { getPhotoInput, photoFile } from '../../contracts/photos';
+import { fileAnswer } from '../../contracts/common';
+import { getPhotoInput } from '../../contracts/photos';
 import { fail, ok } from '../../domain/result';
 import { getBlob } from '../../storage/blob-store';
 import { notFound } from '../failure';
@@ -15,7 +16,7 @@ export const getPhoto = defineVerb({
   permission: 'tickets.read',
   http: { method: 'GET', path: '/api/photos/{photoId}' },
   input: getPhotoInput,
-  output: photoFile,
+  output: fileAnswer,
   async run({ scope, actor }, { photoId }) {
     const found = await findPhoto(scope, photoId, crewLimit(actor));
     if (!found) return fail(notFound('photo'));

@@ -4,7 +4,7 @@ import { fail, ok } from '../../domain/result';
 import { failure } from '../failure';
 import { defineVerb } from '../verb';
 import { openStatement, statementInWords } from './internal';
-import { keepFindings, workOut } from './keep-findings';
+import { keepFindings } from './keep-findings';
 
 export const closeStatement = defineVerb({
   name: 'statements.close',
@@ -18,8 +18,7 @@ export const closeStatement = defineVerb({
     const opened = await openStatement(ctx, statementId);
     if (!opened.ok) return opened;
     const statement = opened.value;
-    await keepFindings(ctx.scope, statement, ctx.company);
-    const { rows } = await workOut(ctx.scope, statement, ctx.company);
+    const { rows } = await keepFindings(ctx.scope, statement, ctx.company);
     const open = rows.filter((row) => row.settled === null).length;
     if (open > 0) {
       const rest = open === 1 ? 'One row is' : `${open} rows are`;

@@ -1,5 +1,5 @@
 import { findStatement } from '../../../db/queries/statements';
-import { photoFile as fileAnswer } from '../../contracts/photos';
+import { fileAnswer } from '../../contracts/common';
 import type { SheetRow } from '../../contracts/sheet';
 import { statementRef } from '../../contracts/statements';
 import { fail, ok } from '../../domain/result';

@@ -1,5 +1,5 @@
 import { listStatements } from '../../../db/queries/statements';
-import { photoFile as fileAnswer } from '../../contracts/photos';
+import { fileAnswer } from '../../contracts/common';
 import { exportStatementsInput, type StatementRow } from '../../contracts/statements';
 import { ok } from '../../domain/result';
 import { type CsvColumn, csvFile } from '../csv-file';

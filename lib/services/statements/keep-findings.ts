@@ -150,18 +150,25 @@ export async function workOut(
   };
 }
 
+/** What keeping a sheet's findings came to. */
+export interface Kept {
+  readonly changed: boolean;
+  /** Keys of the rows that it opened again. */
+  readonly reopened: readonly string[];
+  readonly rows: readonly SheetRow[];
+}
+
 /**
  * Works the sheet out and keeps its ties and findings in the ledger. A person's decision outlives
  * it unless what was decided has changed; a strike on a row that no longer agrees is taken off.
- * Answers with the keys of the rows that it opened again.
  */
 export async function keepFindings(
   scope: Scope,
   statement: StoredStatement,
   company: CompanySettings,
-): Promise<{ readonly changed: boolean; readonly reopened: readonly string[] }> {
+): Promise<Kept> {
   const { facts, result, rows, upToDate } = await workOut(scope, statement, company);
-  if (upToDate) return { changed: false, reopened: [] };
+  if (upToDate) return { changed: false, reopened: [], rows };
   const wanted = matchValues(result.matchResult);
   if (!sameMatches(facts.storedMatches, wanted)) {
     await replaceEngineMatches(scope, statement.id, wanted);
@@ -175,5 +182,5 @@ export async function keepFindings(
   const strikes = await strikesOf(scope, statement.id);
   const reopened = strikes.map(({ rowKey }) => rowKey).filter((key) => !settled.has(key));
   await deleteStrikes(scope, statement.id, reopened);
-  return { changed: true, reopened };
+  return { changed: true, reopened, rows };
 }

@@ -4,8 +4,8 @@ import { refreshInput } from '../../contracts/statements';
 import { fail, ok } from '../../domain/result';
 import { notFound } from '../failure';
 import { defineVerb } from '../verb';
-import { statementInWords } from './internal';
 import { keepFindings } from './keep-findings';
+import { recordRefresh } from './record-refresh';
 
 export const refreshFindings = defineVerb({
   name: 'statements.refresh',
@@ -26,15 +26,7 @@ export const refreshFindings = defineVerb({
       const kept = await keepFindings(ctx.scope, statement, ctx.company);
       if (!kept.changed) continue;
       changed += 1;
-      await ctx.record({
-        action: 'statements.refresh',
-        entity: 'statement',
-        entityId: id,
-        summary: `Held ${statementInWords(statement)} against its facts again${
-          kept.reopened.length > 0 ? `: ${kept.reopened.length} settled rows are open again` : ''
-        }`,
-        after: { reopened: kept.reopened },
-      });
+      await recordRefresh(ctx, statement, kept);
     }
     if (changed === 0) ctx.unchanged();
     return ok({ changed: changed > 0 });

@@ -6,7 +6,8 @@ import { fail, ok } from '../../domain/result';
 import type { Ctx } from '../context';
 import type { Failure } from '../failure';
 import { openStatement, rowsInWords, rowsNamed, statementInWords } from './internal';
-import { keepFindings, workOut } from './keep-findings';
+import { keepFindings } from './keep-findings';
+import { recordRefresh } from './record-refresh';
 
 interface Decision {
   readonly statementId: string;
@@ -33,22 +34,19 @@ export async function settleRows(
   const opened = await openStatement(ctx, decision.statementId);
   if (!opened.ok) return opened;
   const statement = opened.value;
-  await keepFindings(ctx.scope, statement, ctx.company);
-  const before = await workOut(ctx.scope, statement, ctx.company);
-  const named = rowsNamed(before.rows, decision.rowKeys);
+  const kept = await keepFindings(ctx.scope, statement, ctx.company);
+  const named = rowsNamed(kept.rows, decision.rowKeys);
   if (!named.ok) return named;
   const fresh = named.value.filter((row) => row.settled === null);
   const refused = check(fresh);
   if (refused) return fail(refused);
-  if (fresh.length > 0) await store(ctx, statement, fresh, decision);
+  const at = ctx.clock.now();
+  if (fresh.length > 0) await store(ctx, statement, fresh, decision, at);
+  else if (kept.changed) await recordRefresh(ctx, statement, kept);
   else ctx.unchanged();
-  const after = await workOut(ctx.scope, statement, ctx.company);
-  const keys = new Set(decision.rowKeys);
-  return ok({
-    rows: after.rows
-      .filter((row) => keys.has(row.key))
-      .map(({ key, settled }) => ({ key, settled })),
-  });
+  const { state, reason } = decision;
+  const now = { state, reason, by: ctx.actor.name, at: at.toISOString() };
+  return ok({ rows: named.value.map(({ key, settled }) => ({ key, settled: settled ?? now })) });
 }
 
 async function store(
@@ -56,8 +54,8 @@ async function store(
   statement: StoredStatement,
   rows: readonly SheetRow[],
   { state, reason }: Decision,
+  at: Date,
 ): Promise<void> {
-  const at = ctx.clock.now();
   await insertStrikes(
     ctx.scope,
     statement.id,

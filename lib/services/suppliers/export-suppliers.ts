@@ -1,5 +1,5 @@
 import { listSuppliers } from '../../../db/queries/suppliers';
-import { photoFile as fileAnswer } from '../../contracts/photos';
+import { fileAnswer } from '../../contracts/common';
 import { exportSuppliersInput, type SupplierRow } from '../../contracts/suppliers';
 import { ok } from '../../domain/result';
 import { type CsvColumn, csvFile } from '../csv-file';

@@ -1,5 +1,5 @@
 import { listTickets } from '../../../db/queries/ticket-list';
-import { photoFile as fileAnswer } from '../../contracts/photos';
+import { fileAnswer } from '../../contracts/common';
 import type { TicketRow } from '../../contracts/tickets';
 import { exportTicketsInput } from '../../contracts/tickets';
 import { ok } from '../../domain/result';

@@ -1,6 +1,6 @@
 import { listVariances } from '../../../db/queries/variances';
 import { dayIn } from '../../clock';
-import { photoFile as fileAnswer } from '../../contracts/photos';
+import { fileAnswer } from '../../contracts/common';
 import { exportVariancesInput, type VarianceRow } from '../../contracts/variances';
 import { ok } from '../../domain/result';
 import { type CsvColumn, csvFile } from '../csv-file';

@@ -1,4 +1,4 @@
-import { photoFile as fileAnswer } from '../../contracts/photos';
+import { fileAnswer } from '../../contracts/common';
 import { listYieldInput, type YieldFigures } from '../../contracts/yield';
 import { ok } from '../../domain/result';
 import { type CsvColumn, csvFile } from '../csv-file';

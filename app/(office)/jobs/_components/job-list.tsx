@@ -3,14 +3,13 @@
 import { keepPreviousData, useQuery } from '@tanstack/react-query';
 import Link from 'next/link';
 import type { z } from 'zod';
+import { ListBody } from '@/components/shell/list-parts';
 import { sameQuery } from '@/components/shell/list-query';
 import { useListFilter } from '@/components/shell/use-list-filter';
 import { Button } from '@/components/ui/button';
-import { EmptyState } from '@/components/ui/empty';
 import { SelectField } from '@/components/ui/field';
 import { YardsFigure } from '@/components/ui/figures';
-import { Notice } from '@/components/ui/notice';
-import { Pager } from '@/components/ui/pager';
+import { OnSlip } from '@/components/ui/on-slip';
 import { RuledTable, Td, Th } from '@/components/ui/ruled-table';
 import { SearchField } from '@/components/ui/search-field';
 import { StatusText } from '@/components/ui/status-text';
@@ -18,8 +17,6 @@ import type { JobRow, listJobsOutput } from '@/lib/contracts/jobs';
 import { jobsQuery } from '@/lib/queries/jobs';
 import { routes } from '@/lib/routes';
 import { jobWords as words } from '@/lib/text/messages/en/jobs';
-
-const ROWS = 100;
 
 interface JobListProps {
   first: z.output<typeof listJobsOutput>;
@@ -66,29 +63,9 @@ export function JobList({ first, firstQuery }: JobListProps) {
           )}
         </div>
       </search>
-      {error && (
-        <Notice tone="error" className="mx-4 mb-3 md:mx-6">
-          {error.message}
-        </Notice>
-      )}
-      {data && data.total === 0 && (
-        <div className="px-4 md:px-6">
-          <EmptyState title={filtered ? words.noneTitle : words.emptyTitle}>
-            {filtered ? words.noneSays : words.emptySays}
-          </EmptyState>
-        </div>
-      )}
-      {data && data.total > 0 && (
-        <>
-          <JobTable rows={data.rows} />
-          <Pager
-            offset={Number(filter.get('offset')) || 0}
-            limit={Number(filter.get('limit')) || ROWS}
-            total={data.total}
-            onGo={(offset) => filter.set('offset', offset === 0 ? '' : String(offset))}
-          />
-        </>
-      )}
+      <ListBody filter={filter} filtered={filtered} total={data?.total} error={error} words={words}>
+        {data && <JobTable rows={data.rows} />}
+      </ListBody>
     </>
   );
 }
@@ -146,9 +123,4 @@ function JobTable({ rows }: { rows: readonly JobRow[] }) {
       </tbody>
     </RuledTable>
   );
-}
-
-/** On a phone the column's word stands before its figure. */
-function OnSlip({ children }: { children: string }) {
-  return <span className="text-ink-soft md:hidden">{children} </span>;
 }

@@ -1,5 +1,6 @@
 import Link from 'next/link';
 import { YardsFigure } from '@/components/ui/figures';
+import { OnSlip } from '@/components/ui/on-slip';
 import { RuledTable, Td, Th } from '@/components/ui/ruled-table';
 import { StatusText } from '@/components/ui/status-text';
 import type { PlacementRow } from '@/lib/contracts/placements';
@@ -19,7 +20,7 @@ export function PlacementTable({ rows, empty }: PlacementTableProps) {
   if (rows.length === 0) return <p className="px-4 pb-4 text-ink-soft md:px-6">{empty}</p>;
   const { columns } = jobWords;
   return (
-    <RuledTable caption={jobWords.placements}>
+    <RuledTable caption={jobWords.placements} slipsOnPhone>
       <thead>
         <tr>
           <Th>{words.day}</Th>
@@ -45,13 +46,16 @@ export function PlacementTable({ rows, empty }: PlacementTableProps) {
               <span className="block text-[13px] text-ink-soft">{words.elements[row.element]}</span>
             </Td>
             <Td align="right">
-              <YardsFigure value={row.figuredYd3} unit={false} />
+              <OnSlip>{columns.figured}</OnSlip>
+              <YardsFigure value={row.figuredYd3} />
             </Td>
             <Td align="right" copy="ordered">
-              <YardsFigure value={row.orderedYd3} unit={false} />
+              <OnSlip>{columns.ordered}</OnSlip>
+              <YardsFigure value={row.orderedYd3} />
             </Td>
             <Td align="right" copy="delivered">
-              <YardsFigure value={row.deliveredYd3} unit={false} />
+              <OnSlip>{columns.delivered}</OnSlip>
+              <YardsFigure value={row.deliveredYd3} />
             </Td>
             <Td>
               <StatusText look={LOOKS[row.status]}>{words.statuses[row.status]}</StatusText>

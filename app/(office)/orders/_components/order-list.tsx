@@ -3,13 +3,11 @@
 import { keepPreviousData, useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import type { z } from 'zod';
+import { ListBody, ListFoot } from '@/components/shell/list-parts';
 import { sameQuery } from '@/components/shell/list-query';
 import { useListFilter } from '@/components/shell/use-list-filter';
 import { Button } from '@/components/ui/button';
-import { EmptyState } from '@/components/ui/empty';
 import { SelectField, TextField } from '@/components/ui/field';
-import { Notice } from '@/components/ui/notice';
-import { Pager } from '@/components/ui/pager';
 import { SearchField } from '@/components/ui/search-field';
 import type { listOrdersOutput } from '@/lib/contracts/orders';
 import { ORDER_STATUSES } from '@/lib/contracts/orders';
@@ -18,7 +16,6 @@ import { ordersQuery } from '@/lib/queries/jobs';
 import { orderWords as words } from '@/lib/text/messages/en/jobs';
 import { OrderTable } from '../../_components/order-table';
 
-const ROWS = 100;
 const FILTERS = ['status', 'supplierId', 'jobId', 'placementId', 'from', 'to', 'search'];
 
 interface OrderListProps {
@@ -44,29 +41,9 @@ export function OrderList({ first, firstQuery, choices }: OrderListProps) {
         filtered={filtered}
         count={data ? words.count(data.total) : ''}
       />
-      {error && (
-        <Notice tone="error" className="mx-4 mb-3 md:mx-6">
-          {error.message}
-        </Notice>
-      )}
-      {data && data.total === 0 && (
-        <div className="px-4 md:px-6">
-          <EmptyState title={filtered ? words.noneTitle : words.emptyTitle}>
-            {filtered ? words.noneSays : words.emptySays}
-          </EmptyState>
-        </div>
-      )}
-      {data && data.total > 0 && (
-        <>
-          <OrderTable rows={data.rows} empty={words.emptyTitle} />
-          <Pager
-            offset={Number(filter.get('offset')) || 0}
-            limit={Number(filter.get('limit')) || ROWS}
-            total={data.total}
-            onGo={(offset) => filter.set('offset', offset === 0 ? '' : String(offset))}
-          />
-        </>
-      )}
+      <ListBody filter={filter} filtered={filtered} total={data?.total} error={error} words={words}>
+        {data && <OrderTable rows={data.rows} empty={words.emptyTitle} />}
+      </ListBody>
     </>
   );
 }
@@ -86,9 +63,6 @@ function Filters({ filter, choices, filtered, count }: FiltersProps) {
     value: filter.get(name),
     onChange: (event: { target: { value: string } }) => filter.set(name, event.target.value),
   });
-  const exported = new URLSearchParams(filter.query);
-  exported.delete('offset');
-  exported.delete('limit');
   return (
     <search
       aria-label={words.title}
@@ -126,31 +100,22 @@ function Filters({ filter, choices, filtered, count }: FiltersProps) {
       </SelectField>
       <TextField label={words.from} type="date" {...folded} {...bind('from')} />
       <TextField label={words.to} type="date" {...folded} {...bind('to')} />
-      <div className="col-span-full flex flex-wrap items-center gap-x-4 gap-y-2 text-[14px]">
-        <span className="text-ink-soft" role="status">
-          {count}
-        </span>
+      <ListFoot
+        filter={filter}
+        filtered={filtered}
+        count={count}
+        words={words}
+        exportAt="/api/orders/export"
+      >
         <Button
           variant="quiet"
           className="md:hidden"
           aria-expanded={open}
           onClick={() => setOpen(!open)}
         >
-          {words.status} …
+          {words.filters}
         </Button>
-        {filtered && (
-          <Button variant="quiet" onClick={filter.clear}>
-            {words.clear}
-          </Button>
-        )}
-        <a
-          href={`/api/orders/export?${exported.toString()}`}
-          download
-          className="ml-auto inline-flex min-h-11 items-center"
-        >
-          {words.export}
-        </a>
-      </div>
+      </ListFoot>
     </search>
   );
 }

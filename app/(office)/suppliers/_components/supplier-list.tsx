@@ -3,14 +3,11 @@
 import { keepPreviousData, useQuery } from '@tanstack/react-query';
 import Link from 'next/link';
 import type { z } from 'zod';
+import { ListBody, ListFoot } from '@/components/shell/list-parts';
 import { sameQuery } from '@/components/shell/list-query';
 import { useListFilter } from '@/components/shell/use-list-filter';
-import { Button } from '@/components/ui/button';
-import { EmptyState } from '@/components/ui/empty';
 import { SelectField } from '@/components/ui/field';
 import { Difference } from '@/components/ui/figures';
-import { Notice } from '@/components/ui/notice';
-import { Pager } from '@/components/ui/pager';
 import { RuledTable, Td, Th } from '@/components/ui/ruled-table';
 import { SearchField } from '@/components/ui/search-field';
 import type { listSuppliersOutput, SupplierRow } from '@/lib/contracts/suppliers';
@@ -19,7 +16,6 @@ import { suppliersQuery } from '@/lib/queries/suppliers';
 import { routes } from '@/lib/routes';
 import { supplierWords as words } from '@/lib/text/messages/en/suppliers';
 
-const ROWS = 100;
 const FILTERS = ['kind', 'search', 'archived'];
 
 interface SupplierListProps {
@@ -39,9 +35,6 @@ export function SupplierList({ first, firstQuery }: SupplierListProps) {
     value: filter.get(name),
     onChange: (event: { target: { value: string } }) => filter.set(name, event.target.value),
   });
-  const exported = new URLSearchParams(filter.query);
-  exported.delete('offset');
-  exported.delete('limit');
   return (
     <>
       <search
@@ -67,47 +60,17 @@ export function SupplierList({ first, firstQuery }: SupplierListProps) {
           <option value="yes">{words.archivedYes}</option>
           <option value="all">{words.archivedAll}</option>
         </SelectField>
-        <div className="col-span-full flex flex-wrap items-center gap-x-4 gap-y-2 text-[14px]">
-          <span className="text-ink-soft" role="status">
-            {data ? words.count(data.total) : ''}
-          </span>
-          {filtered && (
-            <Button variant="quiet" onClick={filter.clear}>
-              {words.clear}
-            </Button>
-          )}
-          <a
-            href={`/api/suppliers/export?${exported.toString()}`}
-            download
-            className="ml-auto inline-flex min-h-11 items-center"
-          >
-            {words.export}
-          </a>
-        </div>
+        <ListFoot
+          filter={filter}
+          filtered={filtered}
+          count={data ? words.count(data.total) : ''}
+          words={words}
+          exportAt="/api/suppliers/export"
+        />
       </search>
-      {error && (
-        <Notice tone="error" className="mx-4 mb-3 md:mx-6">
-          {error.message}
-        </Notice>
-      )}
-      {data && data.total === 0 && (
-        <div className="px-4 md:px-6">
-          <EmptyState title={filtered ? words.noneTitle : words.emptyTitle}>
-            {filtered ? words.noneSays : words.emptySays}
-          </EmptyState>
-        </div>
-      )}
-      {data && data.total > 0 && (
-        <>
-          <SupplierTable rows={data.rows} />
-          <Pager
-            offset={Number(filter.get('offset')) || 0}
-            limit={Number(filter.get('limit')) || ROWS}
-            total={data.total}
-            onGo={(offset) => filter.set('offset', offset === 0 ? '' : String(offset))}
-          />
-        </>
-      )}
+      <ListBody filter={filter} filtered={filtered} total={data?.total} error={error} words={words}>
+        {data && <SupplierTable rows={data.rows} />}
+      </ListBody>
     </>
   );
 }

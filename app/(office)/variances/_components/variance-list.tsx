@@ -2,14 +2,11 @@
 
 import { keepPreviousData, useQuery } from '@tanstack/react-query';
 import type { z } from 'zod';
+import { ListBody, ListFoot } from '@/components/shell/list-parts';
 import { sameQuery } from '@/components/shell/list-query';
 import { useListFilter } from '@/components/shell/use-list-filter';
 import { useRefreshedFindings } from '@/components/shell/use-refreshed-findings';
-import { Button } from '@/components/ui/button';
-import { EmptyState } from '@/components/ui/empty';
 import { SelectField } from '@/components/ui/field';
-import { Notice } from '@/components/ui/notice';
-import { Pager } from '@/components/ui/pager';
 import type { listVariancesOutput } from '@/lib/contracts/variances';
 import { AGES, VARIANCE_STATUSES } from '@/lib/contracts/variances';
 import { variancesQuery } from '@/lib/queries/statements';
@@ -18,7 +15,6 @@ import { variances as words } from '@/lib/text/messages/en/statements';
 import { varianceKinds } from '@/lib/text/messages/en/variance-kinds';
 import { VarianceTable } from './variance-table';
 
-const ROWS = 100;
 const FILTERS = ['status', 'supplierId', 'kind', 'age', 'statementId'];
 type Answer = z.output<typeof listVariancesOutput>;
 
@@ -40,29 +36,9 @@ export function VarianceList({ first, firstQuery }: VarianceListProps) {
   return (
     <>
       <Filters filter={filter} data={data} filtered={filtered} />
-      {error && (
-        <Notice tone="error" className="mx-4 mb-3 md:mx-6">
-          {error.message}
-        </Notice>
-      )}
-      {data && data.total === 0 && (
-        <div className="px-4 md:px-6">
-          <EmptyState title={filtered ? words.noneTitle : words.emptyTitle}>
-            {filtered ? words.noneSays : words.emptySays}
-          </EmptyState>
-        </div>
-      )}
-      {data && data.total > 0 && (
-        <>
-          <VarianceTable rows={data.rows} totals={data.totals} filter={filter} />
-          <Pager
-            offset={Number(filter.get('offset')) || 0}
-            limit={Number(filter.get('limit')) || ROWS}
-            total={data.total}
-            onGo={(offset) => filter.set('offset', offset === 0 ? '' : String(offset))}
-          />
-        </>
-      )}
+      <ListBody filter={filter} filtered={filtered} total={data?.total} error={error} words={words}>
+        {data && <VarianceTable rows={data.rows} totals={data.totals} filter={filter} />}
+      </ListBody>
     </>
   );
 }
@@ -74,9 +50,6 @@ interface FiltersProps {
 }
 
 function Filters({ filter, data, filtered }: FiltersProps) {
-  const exported = new URLSearchParams(filter.query);
-  exported.delete('offset');
-  exported.delete('limit');
   const bind = (name: string) => ({
     value: filter.get(name),
     onChange: (event: { target: { value: string } }) => filter.set(name, event.target.value),
@@ -123,23 +96,13 @@ function Filters({ filter, data, filtered }: FiltersProps) {
           );
         })}
       </SelectField>
-      <div className="col-span-full flex flex-wrap items-center gap-x-4 gap-y-2 text-[14px]">
-        <span className="text-ink-soft" role="status">
-          {data ? words.count(data.total) : ''}
-        </span>
-        {filtered && (
-          <Button variant="quiet" onClick={filter.clear}>
-            {words.clear}
-          </Button>
-        )}
-        <a
-          href={`/api/variances/export?${exported.toString()}`}
-          download
-          className="ml-auto inline-flex min-h-11 items-center"
-        >
-          {words.export}
-        </a>
-      </div>
+      <ListFoot
+        filter={filter}
+        filtered={filtered}
+        count={data ? words.count(data.total) : ''}
+        words={words}
+        exportAt="/api/variances/export"
+      />
     </search>
   );
 }

@@ -3,6 +3,7 @@
 import Link from 'next/link';
 import type { useListFilter } from '@/components/shell/use-list-filter';
 import { Difference, MoneyFigure } from '@/components/ui/figures';
+import { OnSlip } from '@/components/ui/on-slip';
 import { RuledTable, Td, Th } from '@/components/ui/ruled-table';
 import { SortHead } from '@/components/ui/sort-head';
 import type { VarianceRow } from '@/lib/contracts/variances';
@@ -107,9 +108,4 @@ function Row({ row }: { row: VarianceRow }) {
       </Td>
     </tr>
   );
-}
-
-/** On a phone the column's word stands before its figure. */
-function OnSlip({ children }: { children: string }) {
-  return <span className="text-ink-soft md:hidden">{children} </span>;
 }

@@ -105,6 +105,7 @@ export const orderWords = {
   allJobs: 'All jobs',
   from: 'From',
   to: 'To',
+  filters: 'Filters',
   clear: 'Clear filters',
   export: 'Export CSV',
   count: (total: number) => `${total} ${total === 1 ? 'order' : 'orders'}`,
